@@ -1,0 +1,3 @@
+/** To be written. */
+@org.jspecify.annotations.NullMarked
+package distanceladder.astro;

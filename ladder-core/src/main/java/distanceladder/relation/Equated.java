@@ -1,0 +1,249 @@
+package distanceladder.relation;
+
+import distanceladder.information.Unknowns;
+import distanceladder.text.NameFault;
+import distanceladder.text.Nearest;
+import distanceladder.text.ValueFault;
+import java.util.List;
+import java.util.Optional;
+import java.util.function.ToDoubleFunction;
+
+/**
+ * A relation given by an {@link Equation}.
+ *
+ * <p>Linearised about {@code (mu0, theta0)}: {@code a = dg/dmu}, {@code b = dg/dtheta}, {@code y = observed - g(mu0,
+ * theta0) + a mu0 + b . theta0}. A known offset of the datum from its object (geometry) is added to mu before.
+ */
+public final class Equated implements Relation {
+    private final Equation equation;
+    private final ToDoubleFunction<Datum> start;
+    private final java.util.function.Function<Datum, Optional<String>> refusal;
+    private final String offsetColumn;
+
+    private Equated(
+            Equation equation,
+            ToDoubleFunction<Datum> start,
+            java.util.function.Function<Datum, Optional<String>> refusal,
+            String offsetColumn) {
+        this.equation = equation;
+        this.start = start;
+        this.refusal = refusal;
+        this.offsetColumn = offsetColumn;
+    }
+
+    /**
+     * A relation that starts at modulus 0, and by which any datum gives its object a distance.
+     *
+     * @param equation the equation
+     * @return the relation
+     */
+    public static Equated of(Equation equation) {
+        return new Equated(equation, datum -> 0, datum -> Optional.empty(), "");
+    }
+
+    /**
+     * The same relation with a start for the moduli.
+     *
+     * @param modulus a first modulus from a datum alone
+     * @return the relation
+     */
+    public Equated startingAt(ToDoubleFunction<Datum> modulus) {
+        return new Equated(equation, modulus, refusal, offsetColumn);
+    }
+
+    /**
+     * The same relation with a rule for data that alone give no distance.
+     *
+     * @param reason why a datum alone gives its object none, empty when it does
+     * @return the relation
+     */
+    public Equated refusing(java.util.function.Function<Datum, Optional<String>> reason) {
+        return new Equated(equation, start, reason, offsetColumn);
+    }
+
+    /**
+     * The same relation with known offsets of the data from their objects.
+     *
+     * @param column a column of magnitudes: modulus of the datum minus modulus of its object
+     * @return the relation
+     */
+    public Equated withOffsets(String column) {
+        return new Equated(equation, start, refusal, column);
+    }
+
+    @Override
+    public Points start(Definition definition) {
+        Unknowns unknowns = unknownsOf(definition);
+        double[] parameters = new double[unknowns.size()];
+        for (Input input : definition.inputs()) {
+            for (int i = 0; i < input.unknowns().size(); i++) {
+                int column = unknowns.column(input.unknowns().get(i));
+                if (column >= 0) {
+                    parameters[column] = input.mean()[i];
+                }
+            }
+        }
+        View view = new View(definition, unknowns, parameters);
+        double[] moduli = new double[definition.data().size()];
+        for (int i = 0; i < moduli.length; i++) {
+            view.datum = i;
+            moduli[i] = start.applyAsDouble(view);
+        }
+        return Points.of(moduli, parameters);
+    }
+
+    static Unknowns unknownsOf(Definition definition) {
+        return Unknowns.of(definition.parameters().values());
+    }
+
+    @Override
+    public Optional<String> refusal(Definition definition, int datum, Points at) {
+        double[] parameters = new double[at.parameterCount()];
+        for (int j = 0; j < parameters.length; j++) {
+            parameters[j] = at.parameter(j);
+        }
+        View view = new View(definition, unknownsOf(definition), parameters);
+        view.datum = datum;
+        return refusal.apply(view);
+    }
+
+    @Override
+    public Relation part(int... rows) {
+        return this;
+    }
+
+    @Override
+    public Linearised linearise(Definition definition, Points at) {
+        Observations data = definition.data();
+        Unknowns unknowns = unknownsOf(definition);
+        int p = unknowns.size();
+        double[] observed = data.column(definition.observable());
+        double[] offsets = offsetColumn.isEmpty() ? new double[data.size()] : data.column(offsetColumn);
+        Row row = new Row(definition, unknowns, at);
+        double[] a = new double[data.size()];
+        double[][] rows = new double[data.size()][p + 1];
+        boolean curved = false;
+        for (int i = 0; i < a.length; i++) {
+            boolean bears = !data.objects().get(i).isEmpty();
+            Dual g = equation.predict(row.begin(i, bears, offsets[i]), row);
+            double right = observed[i] - g.value();
+            if (bears) {
+                a[i] = g.partial(0);
+                right += a[i] * at.modulus(i);
+            }
+            for (int j = 0; j < p; j++) {
+                rows[i][j] = g.partial(j + 1);
+                right += rows[i][j] * at.parameter(j);
+            }
+            rows[i][p] = right;
+            requireFinite(definition, i, right);
+            curved |= g.curved();
+        }
+        return new Linearised(unknowns, a, rows, List.of(), curved);
+    }
+
+    private static void requireFinite(Definition definition, int datum, double right) {
+        if (!Double.isFinite(right)) {
+            throw new ValueFault(
+                    "prediction for datum \"" + definition.data().names().get(datum) + "\" is not a finite number",
+                    "a relation predicts a finite observable",
+                    "rung \"" + definition.name() + "\"",
+                    "check the datum's columns, and where the parameters start");
+        }
+    }
+
+    private static NameFault unknownRole(Definition definition, String role) {
+        return new NameFault(
+                "parameter \"" + role + "\"",
+                "a relation reads parameters that its rung names",
+                "rung \"" + definition.name() + "\"",
+                Nearest.hint(role, definition.parameters().keySet()));
+    }
+
+    /** The terms of one row; remembers the order in which an equation asks, so that looking up costs no hashing. */
+    private static final class Row implements Terms {
+        private final Definition definition;
+        private final Unknowns unknowns;
+        private final Points at;
+        private final Tape tape;
+        private final java.util.Map<String, Integer> indices = new java.util.HashMap<>();
+        private final java.util.Map<String, double[]> columns = new java.util.HashMap<>();
+        private int datum;
+
+        Row(Definition definition, Unknowns unknowns, Points at) {
+            this.definition = definition;
+            this.unknowns = unknowns;
+            this.at = at;
+            this.tape = new Tape(unknowns.size() + 1);
+        }
+
+        Dual begin(int index, boolean bears, double offset) {
+            datum = index;
+            tape.rewind();
+            Dual modulus = bears ? tape.variable(0, at.modulus(index)) : tape.constant(0);
+            return offset == 0 ? modulus : modulus.add(offset);
+        }
+
+        @Override
+        public Dual parameter(String role) {
+            Integer index = indices.get(role);
+            if (index == null) {
+                String unknown = definition.parameters().get(role);
+                if (unknown == null) {
+                    throw unknownRole(definition, role);
+                }
+                index = unknowns.column(unknown);
+                indices.put(role, index);
+            }
+            return tape.variable(index + 1, at.parameter(index));
+        }
+
+        @Override
+        public double column(String column) {
+            return columns.computeIfAbsent(column, definition.data()::column)[datum];
+        }
+    }
+
+    /** One datum with present values. */
+    private static final class View implements Datum {
+        private final Definition definition;
+        private final Unknowns unknowns;
+        private final double[] parameters;
+        private int datum;
+
+        View(Definition definition, Unknowns unknowns, double[] parameters) {
+            this.definition = definition;
+            this.unknowns = unknowns;
+            this.parameters = parameters;
+        }
+
+        @Override
+        public String name() {
+            return definition.data().names().get(datum);
+        }
+
+        @Override
+        public double observed() {
+            return definition.data().column(definition.observable())[datum];
+        }
+
+        @Override
+        public double sigma() {
+            return Math.sqrt(definition.noise().covariance().entry(datum, datum));
+        }
+
+        @Override
+        public double column(String column) {
+            return definition.data().column(column)[datum];
+        }
+
+        @Override
+        public double parameter(String role) {
+            String unknown = definition.parameters().get(role);
+            if (unknown == null) {
+                throw unknownRole(definition, role);
+            }
+            return parameters[unknowns.column(unknown)];
+        }
+    }
+}

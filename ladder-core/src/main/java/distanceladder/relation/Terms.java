@@ -1,0 +1,20 @@
+package distanceladder.relation;
+
+/** What an {@link Equation} may read for one datum. */
+public interface Terms {
+    /**
+     * A parameter of the rung by its role.
+     *
+     * @param role the role under which the rung names it
+     * @return its present value as a variable, in base units
+     */
+    Dual parameter(String role);
+
+    /**
+     * A column's number, known exactly.
+     *
+     * @param column name of a column
+     * @return the datum's number in base units
+     */
+    double column(String column);
+}
