@@ -121,7 +121,7 @@ final class StudentQuantile {
         double c = 1;
         double d = 0;
         for (int n = 1; n < FRACTION_STEPS; n++) {
-            double m = n / 2;
+            double m = Math.floor(0.5 * n);
             double term = n % 2 == 0
                     ? m * (b - m) * y / ((a + 2 * m - 1) * (a + 2 * m))
                     : -(a + m) * (a + b + m) * y / ((a + 2 * m) * (a + 2 * m + 1));

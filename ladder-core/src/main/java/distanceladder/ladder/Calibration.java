@@ -39,10 +39,8 @@ public final class Calibration implements Shown {
             lines.add(new Line("", evaluation.estimate(value), "derived"));
         }
         d.parameters().forEach((role, unknown) -> {
-            Input input = solution.ladder()
-                    .inputs(List.of(rung))
-                    .get(d.input(role).orElseThrow().name());
-            Value value = handle(input, unknown);
+            Input input = solution.ladder().input(d.input(role).orElseThrow());
+            Value value = input.value(unknown);
             lines.add(new Line(role, evaluation.estimate(value), how(input)));
         });
         long met = d.data().objects().stream()
@@ -66,13 +64,6 @@ public final class Calibration implements Shown {
 
     private static Unit unit(Definition d) {
         return d.data().unit(d.observable());
-    }
-
-    private static Value handle(Input input, String unknown) {
-        if (input instanceof distanceladder.relation.SourceGroup group) {
-            return group.member(unknown.substring(group.name().length() + 2));
-        }
-        return (distanceladder.relation.Source) input;
     }
 
     private static String how(Input input) {
@@ -117,12 +108,7 @@ public final class Calibration implements Shown {
     static List<Value> values(Solution solution, String rung) {
         Definition d = solution.ladder().rung(rung).definition();
         List<Value> values = new ArrayList<>(d.highlights());
-        d.parameters()
-                .forEach((role, unknown) -> values.add(handle(
-                        solution.ladder()
-                                .inputs(List.of(rung))
-                                .get(d.input(role).orElseThrow().name()),
-                        unknown)));
+        d.parameters().forEach((role, unknown) -> values.add(d.value(role)));
         d.data().objects().stream()
                 .filter(o -> !o.isEmpty() && solution.refusal(o).isEmpty())
                 .distinct()

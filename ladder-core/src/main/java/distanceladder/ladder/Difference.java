@@ -56,17 +56,16 @@ final class Difference {
         double[][] m = after.root();
         double[] gainBefore = Factor.gain(h, l);
         double[] gainAfter = Factor.gain(k, m);
-        switch (meaning(before.name())) {
-            case REMEASURED:
-                return Gains.squares(h) + Gains.squares(k);
-            case UPDATED:
+        return switch (meaning(before.name())) {
+            case REMEASURED -> Gains.squares(h) + Gains.squares(k);
+            case UPDATED -> {
                 Factor.requireSmaller(m, l, before.name());
-                return Gains.squares(h)
+                yield Gains.squares(h)
                         + Gains.squares(k)
                         - 2 * Factor.product(Factor.along(gainBefore, m), Factor.along(gainAfter, m));
-            default:
-                return squaredDistance(Factor.along(gainBefore, l), Factor.along(gainAfter, l));
-        }
+            }
+            case WHAT_IF -> squaredDistance(Factor.along(gainBefore, l), Factor.along(gainAfter, l));
+        };
     }
 
     private static double squaredDistance(double[] h, double[] k) {

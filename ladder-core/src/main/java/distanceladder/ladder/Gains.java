@@ -70,10 +70,6 @@ final class Gains {
                 data.put(
                         rung, new double[assembly.rows(rung).definition().data().size()]);
                 variances.put(rung, 0.0);
-                onRungReadings.put(
-                        rung,
-                        new double
-                                [assembly.elimination(rung).readings().objects().size()]);
             }
             priors(gain.alongPriors());
             assembly.joint().components().forEach(this::component);
@@ -139,9 +135,9 @@ final class Gains {
         }
 
         private double[] gains(String rung) {
-            double[] found = data.get(rung);
-            assert found != null;
-            return found;
+            return data.computeIfAbsent(
+                    rung,
+                    key -> new double[assembly.rows(key).definition().data().size()]);
         }
 
         private void ownErrors() {
@@ -170,9 +166,15 @@ final class Gains {
         }
 
         private void onRung(String rung, String object, double gain) {
-            double[] along = onRungReadings.get(rung);
-            assert along != null;
+            double[] along = alongReadings(rung);
             along[assembly.elimination(rung).readings().index(object)] += gain;
+        }
+
+        private double[] alongReadings(String rung) {
+            return onRungReadings.computeIfAbsent(
+                    rung,
+                    key -> new double
+                            [assembly.elimination(key).readings().objects().size()]);
         }
 
         private void lone() {
@@ -187,8 +189,7 @@ final class Gains {
         private void rung(String name) {
             Whitened white = assembly.rows(name);
             Elimination elimination = assembly.elimination(name);
-            double[] along = onRungReadings.get(name);
-            assert along != null;
+            double[] along = alongReadings(name);
             held(name, along);
             double[] own = piece(Log.ELIMINATION, name);
             double[] down = elimination.down(own, along);

@@ -154,9 +154,10 @@ public final class Ladder implements Shown {
      * @return the rung
      */
     public Rung<?> rung(String name) {
-        require(name);
         Rung<?> rung = rungs.get(name);
-        assert rung != null;
+        if (rung == null) {
+            throw unknown(name, rungs.keySet());
+        }
         return rung;
     }
 
@@ -182,9 +183,17 @@ public final class Ladder implements Shown {
 
     private void require(String name) {
         if (!rungs.containsKey(name)) {
-            throw new NameFault(
-                    "rung \"" + name + "\"", "a rung of the ladder is named", "", Nearest.hint(name, rungs.keySet()));
+            throw unknown(name, rungs.keySet());
         }
+    }
+
+    private static NameFault unknown(String name, Set<String> known) {
+        return new NameFault("rung \"" + name + "\"", "a rung of the ladder is named", "", Nearest.hint(name, known));
+    }
+
+    /** A source of this ladder in its present state. */
+    Input input(Input reference) {
+        return overrides.getOrDefault(reference.name(), reference);
     }
 
     /** The names of the rungs on which a rung rests directly. */

@@ -104,7 +104,7 @@ final class Settled {
     double ownCovariance(String one, String other) {
         Joint joint = assembly.joint();
         if (joint.inComponent(one)) {
-            if (!joint.inComponent(other) || joint.componentOf(one) != joint.componentOf(other)) {
+            if (!joint.inComponent(other) || !joint.componentOf(one).equals(joint.componentOf(other))) {
                 return 0;
             }
             Coupled component = assembly.component(joint.componentOf(one).name());

@@ -343,6 +343,25 @@ public final class Definition {
     }
 
     /**
+     * The handle of a parameter.
+     *
+     * @param role its role
+     * @return a value that any solution can be asked for
+     */
+    public Value value(String role) {
+        Input input = parts.inputs.get(role);
+        String unknown = parts.parameters.get(role);
+        if (input == null || unknown == null) {
+            throw new NameFault(
+                    "parameter \"" + role + "\"",
+                    "a parameter of the rung is named",
+                    name(),
+                    Nearest.hint(role, parts.parameters.keySet()));
+        }
+        return input.value(unknown);
+    }
+
+    /**
      * The source of a parameter.
      *
      * @param role its role

@@ -25,6 +25,14 @@ public sealed interface Input extends Shown permits Source, SourceGroup {
     List<String> unknowns();
 
     /**
+     * The handle of one of its numbers.
+     *
+     * @param unknown one of {@link #unknowns()}
+     * @return a value that any solution can be asked for
+     */
+    Value value(String unknown);
+
+    /**
      * Whether nothing is known of it beforehand.
      *
      * @return true for a free parameter

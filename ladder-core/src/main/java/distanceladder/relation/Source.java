@@ -162,6 +162,11 @@ public final class Source implements Value, Input {
     }
 
     @Override
+    public Value value(String unknown) {
+        return this;
+    }
+
+    @Override
     public boolean free() {
         return distribution.isEmpty();
     }

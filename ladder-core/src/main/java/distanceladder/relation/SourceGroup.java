@@ -146,6 +146,11 @@ public final class SourceGroup implements Input {
     }
 
     @Override
+    public Value value(String unknown) {
+        return member(unknown.substring(name.length() + 2));
+    }
+
+    @Override
     public boolean free() {
         return false;
     }

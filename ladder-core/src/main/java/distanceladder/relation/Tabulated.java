@@ -1,12 +1,15 @@
 package distanceladder.relation;
 
 import distanceladder.information.Unknowns;
+import distanceladder.text.NameFault;
+import distanceladder.text.Nearest;
 import distanceladder.text.ValueFault;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.Set;
 
 /**
  * A relation given by a published design matrix: {@code y = D (mu, theta)}, linear, its columns named as objects or
@@ -75,6 +78,33 @@ public final class Tabulated implements Relation {
         Map<String, double[]> more = new LinkedHashMap<>(columns);
         more.put(name, column.clone());
         return more;
+    }
+
+    /**
+     * Checks that each parameter column has a source, and the other way round.
+     *
+     * @param roles roles for which there are sources
+     * @param where name of the rung
+     */
+    public void requireRoles(Set<String> roles, String where) {
+        for (String role : parameters.keySet()) {
+            if (!roles.contains(role)) {
+                throw new NameFault(
+                        "design column \"" + role + "\"",
+                        "each parameter of a design has a source",
+                        where,
+                        Nearest.hint(role, roles));
+            }
+        }
+        for (String role : roles) {
+            if (!parameters.containsKey(role)) {
+                throw new NameFault(
+                        "source for \"" + role + "\"",
+                        "a source is for a column of the design",
+                        where,
+                        Nearest.hint(role, parameters.keySet()));
+            }
+        }
     }
 
     /**

@@ -1,0 +1,217 @@
+package distanceladder.rung;
+
+import distanceladder.astro.Unit;
+import distanceladder.relation.Definition;
+import distanceladder.relation.Dual;
+import distanceladder.relation.Equated;
+import distanceladder.relation.Noise;
+import distanceladder.relation.Observations;
+import distanceladder.relation.Rung;
+import distanceladder.relation.Source;
+import distanceladder.relation.SourceGroup;
+import distanceladder.relation.Value;
+import distanceladder.text.ValueFault;
+import java.util.ArrayList;
+import java.util.List;
+
+/**
+ * A period-luminosity relation of pulsating stars.
+ *
+ * <pre>m = mu + M + b (log10 P - pivot) + g x + sum_s z_s      [mag]</pre>
+ *
+ * with the apparent (Wesenheit) magnitude m, the modulus mu of the star or its galaxy, the absolute magnitude M of a star
+ * at the pivot period, the slope b, the period P in days, and, when asked for, the metallicity x = [O/H] with its
+ * coefficient g, and common offsets z_s of the photometry (Leavitt and Pickering 1912; Wesenheit magnitudes: Madore
+ * 1982). Linear. Period and metallicity are taken as known exactly; a scatter is given by {@link Rung#withScatter}.
+ *
+ * <p>Columns: {@code magnitude}, {@code magnitude error}; {@code log period} or {@code period}; {@code metallicity} when
+ * asked for; {@code offset} (modulus of the star less that of its galaxy, mag) when present.
+ */
+public final class PeriodLuminosity implements Rung<PeriodLuminosity> {
+    private static final String ZERO_POINT = "zero point";
+    private static final String SLOPE = "slope";
+    private static final String METALLICITY = "metallicity coefficient";
+
+    private final Definition definition;
+    private final double pivot;
+    private final List<String> terms;
+
+    private PeriodLuminosity(Definition definition, double pivot, List<String> terms) {
+        this.definition = definition;
+        this.pivot = pivot;
+        this.terms = terms;
+    }
+
+    /**
+     * A relation with free zero point and slope, its pivot at 10 days.
+     *
+     * @param name name of the rung
+     * @param data columns as said above
+     * @return the rung
+     */
+    public static PeriodLuminosity of(String name, Observations data) {
+        data.require("magnitude", Unit.MAGNITUDE);
+        double[] errors = data.errors("magnitude error", Unit.MAGNITUDE);
+        Observations full = data.has("log period") ? data : withLogPeriod(data);
+        full.require("log period", Unit.LOG_DAY);
+        Definition definition = Definition.of(name, full, "magnitude", Equated.of((mu, at) -> mu))
+                .withNoise(Noise.of(errors))
+                .parameter(ZERO_POINT, Source.free(name + " zero point", Unit.MAGNITUDE))
+                .parameter(SLOPE, Source.free(name + " slope", Unit.MAGNITUDE_PER_DEX));
+        return new PeriodLuminosity(definition, 1, List.of()).related();
+    }
+
+    private static Observations withLogPeriod(Observations data) {
+        data.require("period", Unit.DAY);
+        double[] periods = data.column("period");
+        for (int i = 0; i < periods.length; i++) {
+            if (!(periods[i] > 0)) {
+                throw new ValueFault(
+                        "period = " + periods[i] + " d",
+                        "a period is above zero",
+                        data.label() + ", datum \"" + data.names().get(i) + "\"",
+                        "give the period in days, or column \"log period\"");
+            }
+            periods[i] = StrictMath.log10(periods[i]);
+        }
+        return data.with("log period", Unit.LOG_DAY, periods);
+    }
+
+    private PeriodLuminosity related() {
+        double reference = pivot;
+        List<String> more = terms;
+        Equated relation = Equated.of((mu, at) -> {
+            Dual m = mu.add(at.parameter(ZERO_POINT))
+                    .add(at.parameter(SLOPE).multiply(at.column("log period") - reference));
+            for (String term : more) {
+                Dual factor = at.parameter(term);
+                m = m.add(term.equals(METALLICITY) ? factor.multiply(at.column("metallicity")) : factor);
+            }
+            return m;
+        });
+        String words = "m = mu + M + b (log P - " + pivot + ")"
+                + String.join(
+                        "",
+                        terms.stream()
+                                .map(t -> t.equals(METALLICITY) ? " + g [O/H]" : " + " + t)
+                                .toList());
+        return new PeriodLuminosity(
+                definition
+                        .withRelation(definition.data().has("offset") ? relation.withOffsets("offset") : relation)
+                        .described(words),
+                pivot,
+                terms);
+    }
+
+    private PeriodLuminosity with(String term, Definition changed) {
+        List<String> more = new ArrayList<>(terms);
+        if (!more.contains(term)) {
+            more.add(term);
+        }
+        return new PeriodLuminosity(changed, pivot, List.copyOf(more)).related();
+    }
+
+    /**
+     * The same relation with another pivot.
+     *
+     * @param logPeriod decimal logarithm of the period (days) at which the zero point is stated
+     * @return the rung
+     */
+    public PeriodLuminosity withPivot(double logPeriod) {
+        return new PeriodLuminosity(definition, logPeriod, terms).related();
+    }
+
+    /**
+     * The same relation with another source of the zero point.
+     *
+     * @param source absolute magnitude at the pivot, mag
+     * @return the rung
+     */
+    public PeriodLuminosity withZeroPoint(Source source) {
+        return like(definition.parameter(ZERO_POINT, source));
+    }
+
+    /**
+     * The same relation with another source of the slope.
+     *
+     * @param source slope, mag per dex
+     * @return the rung
+     */
+    public PeriodLuminosity withSlope(Source source) {
+        return like(definition.parameter(SLOPE, source));
+    }
+
+    /**
+     * The same relation with a metallicity term; reads column {@code metallicity}.
+     *
+     * @param source its coefficient, mag per dex
+     * @return the rung
+     */
+    public PeriodLuminosity withMetallicity(Source source) {
+        definition.data().require("metallicity", Unit.DEX);
+        return with(METALLICITY, definition.parameter(METALLICITY, source));
+    }
+
+    /**
+     * The same relation with a metallicity term; reads column {@code metallicity}.
+     *
+     * @param member its coefficient, mag per dex, as a member of a group
+     * @return the rung
+     */
+    public PeriodLuminosity withMetallicity(SourceGroup.Member member) {
+        definition.data().require("metallicity", Unit.DEX);
+        return with(METALLICITY, definition.parameter(METALLICITY, member));
+    }
+
+    /**
+     * The same relation with an offset that all its magnitudes have in common (observed minus true).
+     *
+     * @param offset source of the offset, mag; shared with other rungs that are handed the same
+     * @return the rung
+     */
+    public PeriodLuminosity withCommonOffset(Source offset) {
+        return with(offset.name(), definition.parameter(offset.name(), offset));
+    }
+
+    /**
+     * The zero point.
+     *
+     * @return handle of M, the absolute magnitude at the pivot
+     */
+    public Value zeroPoint() {
+        return definition.value(ZERO_POINT);
+    }
+
+    /**
+     * The slope.
+     *
+     * @return handle of b
+     */
+    public Value slope() {
+        return definition.value(SLOPE);
+    }
+
+    /**
+     * The metallicity coefficient.
+     *
+     * @return handle of g
+     */
+    public Value metallicityCoefficient() {
+        return definition.value(METALLICITY);
+    }
+
+    @Override
+    public Definition definition() {
+        return definition;
+    }
+
+    @Override
+    public PeriodLuminosity like(Definition other) {
+        return new PeriodLuminosity(other, pivot, terms);
+    }
+
+    @Override
+    public String toString() {
+        return text();
+    }
+}

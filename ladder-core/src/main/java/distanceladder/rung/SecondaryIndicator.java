@@ -1,0 +1,175 @@
+package distanceladder.rung;
+
+import distanceladder.astro.Unit;
+import distanceladder.relation.Definition;
+import distanceladder.relation.Dual;
+import distanceladder.relation.Equated;
+import distanceladder.relation.Noise;
+import distanceladder.relation.Observations;
+import distanceladder.relation.Rung;
+import distanceladder.relation.Source;
+import distanceladder.relation.Value;
+import distanceladder.text.NameFault;
+import java.util.ArrayList;
+import java.util.List;
+
+/**
+ * A secondary indicator: objects whose luminosity is known once it is standardised by linear terms.
+ *
+ * <pre>m = mu + M + sum_k c_k x_k + sum_s z_s      [mag]</pre>
+ *
+ * with the apparent magnitude m, the absolute magnitude M, covariates x_k (light-curve shape, colour, width, a step of
+ * 0 or 1) with coefficients c_k (Tripp 1998, equation 2, for supernovae), and common offsets z_s of the photometry, such
+ * as a zero point that another rung shares. Linear. Covariates are taken as known exactly; a scatter is given by {@link
+ * Rung#withScatter}.
+ *
+ * <p>Columns: {@code magnitude}, {@code magnitude error}, and one for each covariate; {@code offset} (modulus of the
+ * datum less that of its object, mag) when present.
+ */
+public final class SecondaryIndicator implements Rung<SecondaryIndicator> {
+    private static final String ZERO_POINT = "zero point";
+
+    private final Definition definition;
+    private final List<String> covariates;
+    private final List<String> offsets;
+
+    private SecondaryIndicator(Definition definition, List<String> covariates, List<String> offsets) {
+        this.definition = definition;
+        this.covariates = covariates;
+        this.offsets = offsets;
+    }
+
+    /**
+     * An indicator with a free zero point and no covariate.
+     *
+     * @param name name of the rung
+     * @param data columns as said above
+     * @return the rung
+     */
+    public static SecondaryIndicator of(String name, Observations data) {
+        data.require("magnitude", Unit.MAGNITUDE);
+        Definition definition = Definition.of(name, data, "magnitude", Equated.of((mu, at) -> mu))
+                .withNoise(Noise.of(data.errors("magnitude error", Unit.MAGNITUDE)))
+                .parameter(ZERO_POINT, Source.free(name + " zero point", Unit.MAGNITUDE));
+        return new SecondaryIndicator(definition, List.of(), List.of()).related();
+    }
+
+    private SecondaryIndicator related() {
+        List<String> terms = covariates;
+        List<String> shifts = offsets;
+        Equated relation = Equated.of((mu, at) -> {
+            Dual m = mu.add(at.parameter(ZERO_POINT));
+            for (String x : terms) {
+                m = m.add(at.parameter(role(x)).multiply(at.column(x)));
+            }
+            for (String z : shifts) {
+                m = m.add(at.parameter(z));
+            }
+            return m;
+        });
+        String words = "m = mu + M"
+                + String.join(
+                        "", covariates.stream().map(x -> " + c(" + x + ") " + x).toList())
+                + String.join("", offsets.stream().map(z -> " + " + z).toList());
+        return new SecondaryIndicator(
+                definition
+                        .withRelation(definition.data().has("offset") ? relation.withOffsets("offset") : relation)
+                        .described(words),
+                covariates,
+                offsets);
+    }
+
+    private static String role(String covariate) {
+        return covariate + " coefficient";
+    }
+
+    /**
+     * The same indicator standardised by a column, its coefficient free.
+     *
+     * @param column name of the column
+     * @return the rung
+     */
+    public SecondaryIndicator withCovariate(String column) {
+        return withCovariate(column, Source.free(definition.name() + " " + role(column), Unit.MAGNITUDE));
+    }
+
+    /**
+     * The same indicator standardised by a column.
+     *
+     * @param column name of the column
+     * @param coefficient source of its coefficient, mag for each unit of the column
+     * @return the rung
+     */
+    public SecondaryIndicator withCovariate(String column, Source coefficient) {
+        definition.data().column(column);
+        return new SecondaryIndicator(
+                        definition.parameter(role(column), coefficient), plus(covariates, column), offsets)
+                .related();
+    }
+
+    /**
+     * The same indicator with an offset that all its magnitudes have in common (observed minus true).
+     *
+     * @param offset source of the offset, mag; shared with other rungs that are handed the same
+     * @return the rung
+     */
+    public SecondaryIndicator withCommonOffset(Source offset) {
+        return new SecondaryIndicator(
+                        definition.parameter(offset.name(), offset), covariates, plus(offsets, offset.name()))
+                .related();
+    }
+
+    private static List<String> plus(List<String> list, String more) {
+        if (list.contains(more)) {
+            return list;
+        }
+        List<String> out = new ArrayList<>(list);
+        out.add(more);
+        return List.copyOf(out);
+    }
+
+    /**
+     * The same indicator with another source of the zero point.
+     *
+     * @param source absolute magnitude, mag
+     * @return the rung
+     */
+    public SecondaryIndicator withZeroPoint(Source source) {
+        return like(definition.parameter(ZERO_POINT, source));
+    }
+
+    /**
+     * The zero point.
+     *
+     * @return handle of M
+     */
+    public Value zeroPoint() {
+        return definition.value(ZERO_POINT);
+    }
+
+    /**
+     * The coefficient of a covariate.
+     *
+     * @param column name of its column
+     * @return its handle
+     * @throws NameFault when the column is no covariate
+     */
+    public Value coefficient(String column) {
+        return definition.value(role(column));
+    }
+
+    @Override
+    public Definition definition() {
+        return definition;
+    }
+
+    @Override
+    public SecondaryIndicator like(Definition other) {
+        return new SecondaryIndicator(other, covariates, offsets);
+    }
+
+    @Override
+    public String toString() {
+        return text();
+    }
+}
