@@ -1,6 +1,7 @@
 package distanceladder.chance;
 
 import distanceladder.text.ValueFault;
+import org.jspecify.annotations.Nullable;
 
 /**
  * Mean and covariance of vectors that stream by, without keeping them.
@@ -84,7 +85,7 @@ public final class Accumulator {
         }
     }
 
-    private void add(double[] otherMean, long otherCount, double @org.jspecify.annotations.Nullable [] otherSpread) {
+    private void add(double[] otherMean, long otherCount, double @Nullable [] otherSpread) {
         double total = (double) count + otherCount;
         double share = otherCount / total;
         double weight = count * share;

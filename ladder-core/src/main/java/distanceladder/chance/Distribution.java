@@ -127,8 +127,8 @@ public sealed interface Distribution {
      * Student's t distribution, moved and stretched; the variance is {@code scale^2 dof / (dof - 2)}, infinite for 2
      * degrees of freedom and fewer.
      *
-     * <p>The quantile is solved for in the incomplete beta function (DLMF 8.17.22), and above 1e5 degrees of freedom
-     * expanded about the normal one (Abramowitz and Stegun 1964, 26.7.5): correct to about 1e-13. Cost: some
+     * <p>The quantile is solved for in the incomplete beta function (DLMF 8.17.22), and with many degrees of
+     * freedom expanded about the normal one (Abramowitz and Stegun 1964, 26.7.5): correct to about 2e-14. Cost: some
      * microseconds.
      *
      * @param location the mean and median, finite
