@@ -12,7 +12,7 @@ import org.jspecify.annotations.Nullable;
  * 1983). No cancellation, whatever the mean. Merging is associative in exact arithmetic and not in bits: for the same
  * bits, cut the stream at the same places and merge in the same order.
  *
- * <p>Mutable, for one thread. Cost: d^2/2 numbers and as many operations a vector.
+ * <p>Mutable, for one thread. Cost: l^2/2 numbers, and as many operations a vector, for vectors of length l.
  */
 public final class Accumulator {
     private final double[] mean;

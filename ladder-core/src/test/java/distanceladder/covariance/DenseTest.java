@@ -2,6 +2,8 @@ package distanceladder.covariance;
 
 import static org.junit.jupiter.api.Assertions.assertArrayEquals;
 import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertFalse;
+import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
@@ -78,6 +80,21 @@ class DenseTest extends CovarianceContract {
             }
         }
         Matrices.assertRoot(Dense.fromCovariance(c));
+    }
+
+    @Test
+    void largeOnesAreChecked() {
+        int n = 150;
+        double[][] c = Matrices.square(Matrices.random(n, n + 10, 3));
+        Matrices.assertRoot(Dense.fromCovariance(c));
+        assertTrue(Definite.overwriting(DenseCheck.unit(c, Matrices.sigmas(c))));
+        double[][] singular = Matrices.square(Matrices.random(n, 100, 3));
+        Matrices.assertRoot(Dense.fromCovariance(singular));
+        assertFalse(Definite.overwriting(DenseCheck.unit(singular, Matrices.sigmas(singular))));
+        double excess = 1.001 * Math.sqrt(c[140][140] * c[149][149]);
+        c[140][149] = excess;
+        c[149][140] = excess;
+        refused("smallest pivot -", () -> Dense.fromCovariance(c));
     }
 
     @Test

@@ -42,6 +42,14 @@ final class Matrices {
         return square;
     }
 
+    static double[] sigmas(double[][] c) {
+        double[] sigmas = new double[c.length];
+        for (int i = 0; i < c.length; i++) {
+            sigmas[i] = Math.sqrt(c[i][i]);
+        }
+        return sigmas;
+    }
+
     /** A table of numbers between -1 and 1. */
     static double[][] random(int rows, int columns, long seed) {
         SplittableRandom random = new SplittableRandom(seed);
