@@ -53,12 +53,11 @@ public final class Calibration implements Shown {
                 ? ""
                 : "; scatter " + Figures.significant(unit(d).fromBase(d.noise().scatter()), 3) + " " + unit(d).symbol()
                         + " (given)";
-        String title = rung + " (" + d.description() + ")\n" + d.data().size() + " data on "
-                + d.data().objects().stream()
-                        .filter(o -> !o.isEmpty())
-                        .distinct()
-                        .count() + " objects, " + met
-                + " of them in other rungs too" + scatter;
+        long objects =
+                d.data().objects().stream().filter(o -> !o.isEmpty()).distinct().count();
+        String title =
+                rung + " (" + d.description() + ")\n" + Figures.count(d.data().size(), "datum", "data") + " on "
+                        + Figures.count(objects, "object", "objects") + ", " + met + " met in other rungs" + scatter;
         return new Calibration(title, List.copyOf(lines));
     }
 

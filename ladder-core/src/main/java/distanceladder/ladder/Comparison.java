@@ -104,13 +104,13 @@ public final class Comparison implements Shown {
     public String text() {
         Grid.Builder grid = Grid.with("value", "before", "after", "unit", "move", "in sigma", "sigma of difference");
         for (Line line : lines()) {
-            String own = line.after.sigma() == 0 ? "" : Figures.signed(line.move / line.after.sigma(), 2);
+            String own = line.after.sigma() == 0 ? "" : Figures.fixed(line.move / line.after.sigma(), 2);
             grid.row(
                     line.name,
                     Figures.pair(line.before.value(), line.before.sigma()),
                     Figures.pair(line.after.value(), line.after.sigma()),
                     line.after.unit().symbol(),
-                    Figures.signed(line.move, 3),
+                    Figures.move(line.move, Math.max(line.before.sigma(), line.after.sigma())),
                     own,
                     line.exact() ? "exact" : Figures.sigma(line.sigma));
         }

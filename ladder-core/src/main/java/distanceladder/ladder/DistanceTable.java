@@ -1,6 +1,7 @@
 package distanceladder.ladder;
 
 import distanceladder.astro.Distances;
+import distanceladder.astro.Unit;
 import distanceladder.relation.Definition;
 import distanceladder.text.Figures;
 import distanceladder.text.Grid;
@@ -12,6 +13,8 @@ import java.util.Optional;
 /** The distances of a rung's objects in a solution. */
 public final class DistanceTable implements Shown {
     private static final int SHOWN = 20;
+    private static final double NEAR = 20;
+    private static final double FIRST_ORDER = 1;
 
     private final String rung;
     private final List<Line> lines;
@@ -62,23 +65,40 @@ public final class DistanceTable implements Shown {
         return lines;
     }
 
+    /** All, or the first rows and those without a distance. */
+    private List<Line> shown() {
+        List<Line> some = new ArrayList<>();
+        for (Line line : lines) {
+            if (lines.size() <= SHOWN
+                    || some.size() < SHOWN / 2
+                    || line.refusal.isPresent()
+                    || line.sigma > FIRST_ORDER) {
+                some.add(line);
+            }
+        }
+        return some;
+    }
+
     @Override
     public String text() {
-        Grid.Builder grid = Grid.with("object", "modulus [mag]", "distance [Mpc]", "data in");
-        int shown = Math.min(SHOWN, lines.size());
-        for (Line line : lines.subList(0, shown)) {
+        Unit unit = lines.stream().allMatch(l -> !(l.modulus >= NEAR)) ? Unit.KILOPARSEC : Unit.MEGAPARSEC;
+        Grid.Builder grid = Grid.with("object", "modulus [mag]", "distance [" + unit.symbol() + "]", "data in", "note");
+        List<Line> some = shown();
+        for (Line line : some) {
             if (line.refusal.isPresent()) {
-                grid.row(line.object, "none", line.refusal.get(), line.by);
+                grid.row(line.object, "none", "none", line.by, line.refusal.get());
             } else {
-                double d = Distances.megaparsecFromModulus(line.modulus);
+                double d = unit.fromBase(Distances.megaparsecFromModulus(line.modulus));
+                String note = line.sigma > FIRST_ORDER ? "first order does not hold over such an error" : "";
                 grid.row(
                         line.object,
                         Figures.pair(line.modulus, line.sigma),
                         Figures.pair(d, d * line.sigma * StrictMath.log(10) / 5),
-                        line.by);
+                        line.by,
+                        note);
             }
         }
-        String rest = shown < lines.size() ? "\n... and " + (lines.size() - shown) + " more objects" : "";
+        String rest = some.size() < lines.size() ? "\n... and " + (lines.size() - some.size()) + " more objects" : "";
         return grid.titled("Distances of " + rung + ": " + lines.size() + " objects")
                         .build()
                         .text()

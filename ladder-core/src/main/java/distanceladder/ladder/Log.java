@@ -110,11 +110,17 @@ public final class Log implements Shown {
         return new Log(lines, found, List.copyOf(moves));
     }
 
+    /** At most two reasons; the line itself holds all. */
+    private static String shortened(String why) {
+        String[] reasons = why.split(", ", -1);
+        return reasons.length <= 2 ? why : reasons[0] + " and " + (reasons.length - 1) + " more inputs changed";
+    }
+
     @Override
     public String text() {
         Grid.Builder grid = Grid.with("step", "where", "size", "times", "why");
         for (Line line : lines) {
-            grid.row(line.step().what(), line.step().where(), line.step().size(), line.times(), line.why());
+            grid.row(line.step().what(), line.step().where(), line.step().size(), line.times(), shortened(line.why()));
         }
         String head = lines.size() + " steps done, " + found + " found kept";
         String text = grid.titled(head).build().text();
@@ -123,7 +129,7 @@ public final class Log implements Shown {
         }
         Grid.Builder moves = Grid.with("rung stated anew", "largest move", "of its own sigma");
         for (Restated r : restated) {
-            moves.row(r.rung(), r.largest(), distanceladder.text.Figures.signed(r.sigmas(), 2));
+            moves.row(r.rung(), r.largest(), distanceladder.text.Figures.fixed(r.sigmas(), 2));
         }
         return text + "\n\n" + moves.build().text();
     }

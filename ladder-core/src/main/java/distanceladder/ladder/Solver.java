@@ -18,13 +18,16 @@ import java.util.TreeSet;
  * Solves a set of rungs: linearise, solve, and again at the solution until the points stand still.
  *
  * <p>Gauss-Newton iteration from a start that the data alone fix; nothing is taken over from another solution. A modulus
- * moves by at most {@link #LONGEST} in a step. It has converged when no modulus moves by more than {@link #CLOSE} of its
+ * moves by at most {@link #LONGEST} in a step, and steps are shortened while a value swings to and fro (data far
+ * from their relation make it do so). It has converged when no modulus moves by more than {@link #CLOSE} of its
  * reading's own error and no parameter by more than that of its standard deviation.
  */
 final class Solver {
     static final int MOST = 200;
     static final double CLOSE = 1e-10;
     static final double LONGEST = 2.5;
+    private static final double SWING = 0.5;
+    private static final double LEAST_DAMPING = 1.0 / 64;
 
     private final Ladder ladder;
     private final TreeSet<String> set;
@@ -51,23 +54,38 @@ final class Solver {
         }
         String worst = "";
         double farthest = 0;
+        double damping = 1;
         for (int round = 0; round < MOST; round++) {
             Settled now = at(points);
-            Step step = new Step(now);
+            Step step = new Step(now, damping);
             TreeMap<String, Points> next = new TreeMap<>();
             points.forEach((name, old) -> next.put(name, step.next(name, old)));
             if (step.farthest <= CLOSE) {
                 return now;
             }
+            damping = damped(damping, step, worst, farthest);
             worst = step.worst;
-            farthest = step.farthest;
+            farthest = step.signed;
             points = next;
         }
         throw new ConvergenceFault(
-                worst + " still moves by " + distanceladder.text.Figures.significant(farthest, 3) + " of its error",
+                worst + " still moves by " + distanceladder.text.Figures.significant(Math.abs(farthest), 3)
+                        + " of its error",
                 "the points of linearisation stand still within " + MOST + " rounds",
                 "solution over " + log.set(),
                 "check the datum, or start a parameter nearer to its value");
+    }
+
+    /** Shorter steps while the unknown that moves most swings to and fro, longer ones while it creeps one way. */
+    private static double damped(double damping, Step step, String worst, double farthest) {
+        if (!step.worst.equals(worst)) {
+            return damping;
+        }
+        double ratio = step.signed / farthest;
+        if (ratio < -SWING) {
+            return Math.max(LEAST_DAMPING, damping / 2);
+        }
+        return ratio > SWING ? Math.min(1, damping * 1.5) : damping;
     }
 
     /** Solves at given points. */
@@ -108,11 +126,14 @@ final class Solver {
     /** One step of the iteration, and how far it goes. */
     private static final class Step {
         private final Settled now;
+        private final double damping;
         private double farthest;
+        private double signed;
         private String worst = "";
 
-        Step(Settled now) {
+        Step(Settled now, double damping) {
             this.now = now;
+            this.damping = damping;
         }
 
         Points next(String name, Points old) {
@@ -125,9 +146,10 @@ final class Solver {
             for (int j = 0; j < parameters.length; j++) {
                 String unknown = white.linear().unknowns().name(j);
                 Stated value = now.unknown(unknown);
-                parameters[j] = value.value();
+                double move = value.value() - old.parameter(j);
                 double sigma = value.sigma();
-                note(unknown, sigma == 0 ? 0 : (parameters[j] - old.parameter(j)) / sigma);
+                parameters[j] = sigma == 0 ? value.value() : old.parameter(j) + damping * move;
+                note(unknown, sigma == 0 ? 0 : move / sigma);
             }
             double[] moduli = new double[old.size()];
             for (int i = 0; i < moduli.length; i++) {
@@ -142,14 +164,15 @@ final class Solver {
 
         private double moved(String object, double old) {
             double to = now.modulus(object);
-            double move = Math.max(-LONGEST, Math.min(LONGEST, to - old));
-            note(Ladder.unknown(object), move / now.ownError(object));
+            double move = damping * Math.max(-LONGEST, Math.min(LONGEST, to - old));
+            note(Ladder.unknown(object), (to - old) / now.ownError(object));
             return old + move;
         }
 
         private void note(String what, double move) {
             if (!(Math.abs(move) <= farthest)) {
                 farthest = Math.abs(move);
+                signed = move;
                 worst = what;
             }
         }

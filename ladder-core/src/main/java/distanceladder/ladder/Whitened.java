@@ -26,6 +26,7 @@ final class Whitened {
     private final Linearised linear;
     private final Unknowns unknowns;
     private final int columns;
+    private final double[][] carried;
     private final ObjectRows free;
     private final int[] freeData;
     private final double[] sigmas;
@@ -35,7 +36,8 @@ final class Whitened {
     Whitened(Definition definition, Linearised linear) {
         this.definition = definition;
         this.linear = linear;
-        Split split = definition.noise().covariance().split();
+        int[] order = order();
+        Split split = definition.noise().covariance().part(order).split();
         this.columns = split.columnCount();
         List<String> all = new ArrayList<>(linear.unknowns().asList());
         for (int q = 0; q < columns; q++) {
@@ -46,22 +48,22 @@ final class Whitened {
         double scatter = definition.noise().scatter();
         this.sigmas = new double[variances.length];
         boolean[] inBlock = new boolean[variances.length];
-        double[][] carried = split.columns();
-        int number = 1;
+        double[][] columnsOf = split.columns();
+        this.carried = new double[order.length][];
+        for (int k = 0; k < order.length; k++) {
+            sigmas[order[k]] = Math.sqrt(variances[k] + scatter * scatter);
+            carried[order[k]] = columnsOf[k];
+        }
         for (Block block : split.blocks()) {
-            blocks.add(blockRows(block, number++, carried, inBlock));
+            blocks.add(blockRows(block, order, inBlock));
         }
-        for (int i = 0; i < sigmas.length; i++) {
-            sigmas[i] = Math.sqrt(variances[i] + scatter * scatter);
-        }
-        int[] order = order();
         freeData = IntStream.of(order)
                 .filter(i -> !inBlock[i] && linear.ties(i).isEmpty())
                 .toArray();
         tied = IntStream.of(order)
                 .filter(i -> !inBlock[i] && !linear.ties(i).isEmpty())
                 .toArray();
-        this.free = freeRows(carried);
+        this.free = freeRows();
     }
 
     private String privateName(int q) {
@@ -84,7 +86,7 @@ final class Whitened {
     }
 
     /** A datum's parameters, carried columns and right side, on the unknowns of this rung. */
-    private double[] raw(int datum, double[][] carried) {
+    private double[] raw(int datum) {
         double[] from = linear.rows()[datum];
         double[] row = new double[unknowns.size() + 1];
         for (int j = 0; j < linear.unknowns().size(); j++) {
@@ -97,7 +99,7 @@ final class Whitened {
         return row;
     }
 
-    private ObjectRows freeRows(double[][] carried) {
+    private ObjectRows freeRows() {
         int n = freeData.length;
         String[] objects = new String[n];
         double[] a = new double[n];
@@ -106,7 +108,7 @@ final class Whitened {
             int i = freeData[k];
             objects[k] = object(i);
             a[k] = linear.coefficients()[i] / sigmas[i];
-            rows[k] = divided(raw(i, carried), sigmas[i]);
+            rows[k] = divided(raw(i), sigmas[i]);
         }
         return ObjectRows.of(unknowns, objects, a, rows);
     }
@@ -118,8 +120,8 @@ final class Whitened {
         return row;
     }
 
-    private BlockRows blockRows(Block block, int number, double[][] carried, boolean[] inBlock) {
-        int[] data = block.indices();
+    private BlockRows blockRows(Block block, int[] order, boolean[] inBlock) {
+        int[] data = IntStream.of(block.indices()).map(k -> order[k]).toArray();
         String[] objects = new String[data.length];
         double[] a = new double[data.length];
         double[][] rows = new double[data.length][];
@@ -128,17 +130,16 @@ final class Whitened {
             inBlock[i] = true;
             objects[k] = object(i);
             a[k] = linear.coefficients()[i];
-            rows[k] = raw(i, carried);
+            rows[k] = raw(i);
         }
-        return new BlockRows(definition.name() + " block " + number, data, objects, a, rows, block);
+        return new BlockRows(definition.name() + " block " + (blocks.size() + 1), data, objects, a, rows, block);
     }
 
     /** Rows with a tie, divided by their errors, on the unknowns and the distances that they bear on. */
     double[][] tiedRows(Unknowns wider) {
         double[][] out = new double[tied.length][];
-        double[][] carried = definition.noise().covariance().split().columns();
         for (int k = 0; k < tied.length; k++) {
-            out[k] = divided(tiedRow(tied[k], raw(tied[k], carried), wider), sigmas[tied[k]]);
+            out[k] = divided(tiedRow(tied[k], raw(tied[k]), wider), sigmas[tied[k]]);
         }
         return out;
     }

@@ -13,7 +13,13 @@ import distanceladder.text.ValueFault;
  * @param unit the unit of both
  */
 public record Amount(double value, double sigma, Unit unit) implements Shown {
-    /** Checks that both numbers are finite and the standard deviation is not negative. */
+    /**
+     * Checks that both numbers are finite and the standard deviation is not negative.
+     *
+     * @param value the number
+     * @param sigma its standard deviation
+     * @param unit the unit of both
+     */
     public Amount {
         if (!Double.isFinite(value)) {
             throw new ValueFault(

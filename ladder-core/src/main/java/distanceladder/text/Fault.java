@@ -8,9 +8,16 @@ package distanceladder.text;
 public class Fault extends RuntimeException {
     private static final long serialVersionUID = 1;
 
+    /** What was wrong. */
     private final String what;
+
+    /** The rule that it broke. */
     private final String rule;
+
+    /** Where it is. */
     private final String where;
+
+    /** How to mend it. */
     private final String repair;
 
     Fault(String what, String rule, String where, String repair) {

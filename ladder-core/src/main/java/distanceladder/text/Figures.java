@@ -102,6 +102,51 @@ public final class Figures {
     }
 
     /**
+     * A signed number with fixed decimals.
+     *
+     * @param x a number
+     * @param decimals digits behind the point
+     * @return with + or -; "0" and the decimals without a sign where it rounds to zero
+     */
+    public static String fixed(double x, int decimals) {
+        if (!Double.isFinite(x)) {
+            return word(x);
+        }
+        BigDecimal rounded = new BigDecimal(x).setScale(decimals, RoundingMode.HALF_EVEN);
+        if (rounded.signum() == 0) {
+            return rounded.abs().toPlainString();
+        }
+        return (rounded.signum() > 0 ? "+" : "") + rounded.toPlainString();
+    }
+
+    /**
+     * A small move of a value: signed, to one place beyond those of its standard deviation.
+     *
+     * @param move a difference
+     * @param sigma the standard deviation of the value that moved
+     * @return the move
+     */
+    public static String move(double move, double sigma) {
+        if (!Double.isFinite(move) || !(sigma > 0)) {
+            return signed(move, 3);
+        }
+        int decimals = 1 - place(sigma);
+        return decimals < 0 || decimals > 12 ? signed(move, 3) : fixed(move, decimals);
+    }
+
+    /**
+     * A count with its noun.
+     *
+     * @param n how many
+     * @param one the noun for one
+     * @param more the noun for any other number
+     * @return such as {@code 3 data}
+     */
+    public static String count(long n, String one, String more) {
+        return n + " " + (n == 1 ? one : more);
+    }
+
+    /**
      * A share in per cent.
      *
      * @param fraction 1 for all

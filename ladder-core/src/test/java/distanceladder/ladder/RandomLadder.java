@@ -145,7 +145,7 @@ final class RandomLadder {
         int n = data.size();
         Observations table = Observations.of(name, data)
                 .bearingOn(bearing)
-                .with("magnitude", Unit.MAGNITUDE, normals(n, 20, 1))
+                .with("magnitude", Unit.MAGNITUDE, magnitudes(bearing))
                 .with("magnitude error", Unit.MAGNITUDE, uniforms(n, 0.05, 0.3))
                 .with("x", Unit.NONE, normals(n, 0.3, 1))
                 .with("w1", Unit.NONE, normals(n, 1, 0.5))
@@ -167,6 +167,19 @@ final class RandomLadder {
             rung = rung.withParameter("shared", shared);
         }
         return rung.withNoise(noise(n, dense));
+    }
+
+    /** Magnitudes near a truth in which the modulus of an object follows from its name. */
+    private double[] magnitudes(List<String> bearing) {
+        double[] m = normals(bearing.size(), -10, 0.2);
+        for (int i = 0; i < m.length; i++) {
+            String object = bearing.get(i);
+            if (!object.isEmpty()) {
+                int number = Integer.parseInt(object.substring(object.indexOf(' ') + 1));
+                m[i] += object.startsWith("host") ? 29.4 + 0.7 * number : 33 + 0.3 * number;
+            }
+        }
+        return m;
     }
 
     private Noise noise(int n, boolean dense) {

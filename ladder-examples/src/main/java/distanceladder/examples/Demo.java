@@ -35,8 +35,13 @@ public final class Demo {
         show(solution);
 
         title("Distances");
+        out.println("from their parallaxes alone:");
+        show(solution.over("parallaxes").distances(skerry.parallaxes));
+        out.println("the same stars with all that is known of them:");
         show(solution.distances(skerry.parallaxes));
+        out.println("from below, as one would publish them:");
         show(solution.below(skerry.pulsators).distances(skerry.pulsators));
+        out.println("from the whole ladder:");
         show(solution.distances(skerry.explosions));
 
         title("The Hubble constant, and where its error comes from");

@@ -21,7 +21,7 @@ import java.util.Map;
  */
 public final class Scenario {
     /** The seed of the committed tables. */
-    public static final long SEED = 20261201;
+    public static final long SEED = 13;
 
     static final double HUBBLE = 71.8;
     static final double ZERO_POINT = -5.92;
@@ -107,8 +107,9 @@ public final class Scenario {
                 "metallicity"));
         for (int i = 1; i <= 60; i++) {
             String star = String.format(Locale.ROOT, "Tarn %02d", i);
-            double kiloparsec = between(star, 0, 0.4, 6);
-            double error = i % 6 == 0 ? between(star, 1, 0.25, 0.4) : between(star, 1, 0.018, 0.05);
+            boolean faint = i % 6 == 0;
+            double kiloparsec = faint ? between(star, 0, 3, 6) : between(star, 0, 0.4, 6);
+            double error = faint ? between(star, 1, 0.3, 0.45) : between(star, 1, 0.018, 0.05);
             double parallax = 1 / kiloparsec + PARALLAX_OFFSET + error * normal(star, 2);
             double logPeriod = between(star, 3, 0.6, 1.6);
             double metals = 0.1 * normal(star, 4);
