@@ -229,6 +229,51 @@ public final class Coupled {
     }
 
     /**
+     * Residuals of the raw rows, weighted by the inverse of their covariance, distances at their best: {@code C^-1 r}.
+     *
+     * @param unknowns values of the component's unknowns
+     * @return one number for each raw row
+     */
+    public double[] weighted(double[] unknowns) {
+        double[] w = new double[white.length];
+        for (int i = 0; i < w.length; i++) {
+            w[i] = white[i][unknowns.length];
+            for (int j = 0; j < unknowns.length; j++) {
+                w[i] -= white[i][j] * unknowns[j];
+            }
+        }
+        double[] raw = cholesky.backward(w);
+        double[] out = new double[source.rows().length];
+        for (int i = 0; i < raw.length; i++) {
+            out[main[i]] += raw[i];
+            if (pivot[i] >= 0) {
+                out[pivot[i]] -= factor[i] * raw[i];
+            }
+        }
+        return out;
+    }
+
+    /**
+     * The modulus of one object, without its error. Cost n.
+     *
+     * @param values values of the component's unknowns
+     * @param weighted what {@link #weighted} gives for them
+     * @param object one of {@link #objects()}
+     * @return its modulus at these values
+     */
+    public double modulus(double[] values, double[] weighted, String object) {
+        int p = pivots.getOrDefault(object, -1);
+        double sum = source.rows()[p][values.length];
+        for (int j = 0; j < values.length; j++) {
+            sum -= source.rows()[p][j] * values[j];
+        }
+        for (int i = 0; i < weighted.length; i++) {
+            sum -= source.covariance(p, i) * weighted[i];
+        }
+        return sum / source.coefficients()[p];
+    }
+
+    /**
      * Carries gains down to the rows as given (not whitened).
      *
      * @param alongTriangle components along the triangle's rows

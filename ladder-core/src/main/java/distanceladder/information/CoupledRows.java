@@ -9,10 +9,16 @@ package distanceladder.information;
  * @param coefficients for each row the factor of its object's distance; 0 where there is none
  * @param rows each p coefficients and the right side; not whitened
  * @param noise covariance of the errors of the first noise.length rows, square; the rows after them are independent of
- *     all others and have unit variance. Shared with the caller, who must not change it
+ *     all others and have unit variance, or none. Shared with the caller, who must not change it
+ * @param exact which rows have no error; rows of the noise are not among them
  */
 public record CoupledRows(
-        Unknowns unknowns, String[] objects, double[] coefficients, double[][] rows, double[][] noise) {
+        Unknowns unknowns,
+        String[] objects,
+        double[] coefficients,
+        double[][] rows,
+        double[][] noise,
+        boolean[] exact) {
 
     /**
      * The covariance of two rows' errors.
@@ -25,6 +31,6 @@ public record CoupledRows(
         if (i < noise.length && j < noise.length) {
             return noise[i][j];
         }
-        return i == j ? 1 : 0;
+        return i == j && !exact[i] ? 1 : 0;
     }
 }

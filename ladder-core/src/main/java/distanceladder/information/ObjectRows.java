@@ -17,8 +17,16 @@ public final class ObjectRows {
     private final int[] starts;
     private final double[] coefficients;
     private final double[][] rows;
+    private final boolean[] exact;
 
-    private ObjectRows(Unknowns unknowns, String[] objects, int[] starts, double[] coefficients, double[][] rows) {
+    private ObjectRows(
+            Unknowns unknowns,
+            String[] objects,
+            int[] starts,
+            double[] coefficients,
+            double[][] rows,
+            boolean[] exact) {
+        this.exact = exact;
         this.unknowns = unknowns;
         this.objects = objects;
         this.starts = starts;
@@ -36,6 +44,21 @@ public final class ObjectRows {
      * @return the rows
      */
     public static ObjectRows of(Unknowns unknowns, String[] objects, double[] coefficients, double[][] rows) {
+        return of(unknowns, objects, coefficients, rows, new boolean[rows.length]);
+    }
+
+    /**
+     * As above, some of the rows without any error.
+     *
+     * @param unknowns columns of the rows
+     * @param objects for each row its object's name, "" for none
+     * @param coefficients for each row the factor of its object's distance
+     * @param rows each p coefficients and the right side, whitened unless exact
+     * @param exact which rows are exact; each of these has an object
+     * @return the rows
+     */
+    public static ObjectRows of(
+            Unknowns unknowns, String[] objects, double[] coefficients, double[][] rows, boolean[] exact) {
         List<String> names = new ArrayList<>();
         int[] starts = new int[rows.length + 1];
         for (int i = 0; i < rows.length; i++) {
@@ -48,7 +71,12 @@ public final class ObjectRows {
         }
         starts[names.size()] = rows.length;
         return new ObjectRows(
-                unknowns, names.toArray(new String[0]), Arrays.copyOf(starts, names.size() + 1), coefficients, rows);
+                unknowns,
+                names.toArray(new String[0]),
+                Arrays.copyOf(starts, names.size() + 1),
+                coefficients,
+                rows,
+                exact);
     }
 
     /**
@@ -67,6 +95,7 @@ public final class ObjectRows {
         String[] names = new String[n];
         double[] a = new double[n];
         double[][] rows = new double[n][];
+        boolean[] exact = new boolean[n];
         for (int s = 0; s < k; s++) {
             Readings part = parts.get(s);
             int[] at = part.unknowns().columnsIn(union);
@@ -75,10 +104,11 @@ public final class ObjectRows {
                 int index = part.require(objects.get(o));
                 names[i] = objects.get(o);
                 a[i] = part.coefficient(index);
+                exact[i] = part.exact(index);
                 rows[i] = spread(part.row(index), at, union.size());
             }
         }
-        return of(union, names, a, rows);
+        return of(union, names, a, rows, exact);
     }
 
     static double[] spread(double[] row, int[] at, int size) {
@@ -123,6 +153,10 @@ public final class ObjectRows {
 
     double coefficient(int row) {
         return coefficients[row];
+    }
+
+    boolean exact(int row) {
+        return exact[row];
     }
 
     double[] row(int row) {

@@ -14,8 +14,10 @@ public final class Readings {
     private final String[] objects;
     private final double[] coefficients;
     private final double[][] rows;
+    private final boolean[] exact;
 
-    Readings(Unknowns unknowns, String[] objects, double[] coefficients, double[][] rows) {
+    Readings(Unknowns unknowns, String[] objects, double[] coefficients, double[][] rows, boolean[] exact) {
+        this.exact = exact;
         this.unknowns = unknowns;
         this.objects = objects;
         this.coefficients = coefficients;
@@ -66,6 +68,16 @@ public final class Readings {
      */
     public double coefficient(int index) {
         return coefficients[index];
+    }
+
+    /**
+     * Whether a reading has no error: the distance is then fixed by the other unknowns.
+     *
+     * @param index object
+     * @return true for a constraint
+     */
+    public boolean exact(int index) {
+        return exact[index];
     }
 
     /**

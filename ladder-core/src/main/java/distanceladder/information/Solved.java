@@ -209,6 +209,32 @@ public final class Solved {
         return new Combination(constant, transposedSolve(c));
     }
 
+    /**
+     * The values of some unknowns, by one back substitution; for points of linearisation.
+     *
+     * @param unknowns names
+     * @return their estimates
+     */
+    public double[] values(Unknowns unknowns) {
+        double[] x = new double[columns];
+        for (int i = columns - 1; i >= 0; i--) {
+            double sum = r[i][columns];
+            for (int j = i + 1; j < columns; j++) {
+                sum -= r[i][j] * x[j];
+            }
+            x[i] = sum / r[i][i];
+        }
+        double[] out = new double[unknowns.size()];
+        for (int k = 0; k < out.length; k++) {
+            double[] c = new double[columns];
+            out[k] = place(c, unknowns.name(k), 1);
+            for (int j = 0; j < columns; j++) {
+                out[k] += c[j] * x[j];
+            }
+        }
+        return out;
+    }
+
     private double[] transposedSolve(double[] c) {
         double[] t = c.clone();
         for (int i = 0; i < columns; i++) {

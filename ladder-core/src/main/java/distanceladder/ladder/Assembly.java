@@ -45,11 +45,11 @@ final class Assembly {
     /** Where a row of a component comes from: a datum of a rung, or (datum -1) the reading of an object. */
     record Supply(String rung, int datum, String object) {}
 
-    Assembly(Ladder ladder, Map<String, Points> points, Kept kept, Log.Recorder log) {
+    Assembly(Ladder ladder, Map<String, Decided> decided, Kept kept, Log.Recorder log) {
         this.ladder = ladder;
         this.kept = kept;
         this.log = log;
-        points.forEach(this::addRung);
+        decided.forEach(this::addRung);
         this.joint = join();
         addOwn();
         addMeetings();
@@ -65,7 +65,8 @@ final class Assembly {
                 new Log.Step(Log.MERGE, log.set(), width), parts, log, () -> Reduction.ofTriangles(triangles));
     }
 
-    private void addRung(String name, Points at) {
+    private void addRung(String name, Decided decided) {
+        Points at = decided.points();
         Definition d = ladder.rung(name).definition();
         Points start = d.relation().start(d);
         Linearised linear = linearise(name, d, start);
@@ -76,9 +77,9 @@ final class Assembly {
         int n = d.data().size();
         Whitened white = kept.keep(
                 new Log.Step(Log.WHITENING, name, n),
-                List.of(new Part("its rows", use)),
+                List.of(new Part("its rows", use), new Part("its scatter", decided.variance())),
                 log,
-                () -> new Whitened(d, use));
+                () -> new Whitened(d, use, decided.scatter()));
         rows.put(name, white);
         eliminations.put(
                 name,
@@ -106,11 +107,20 @@ final class Assembly {
             for (Whitened.BlockRows block : white.blocks()) {
                 Set<String> objects = new HashSet<>(List.of(block.objects()));
                 objects.remove("");
-                blocks.add(new Joint.BlockObjects(block.name(), name, objects));
+                blocks.add(new Joint.BlockObjects(block.name(), name, block.link(), objects));
             }
             tied.addAll(white.tiedObjects());
         });
-        return new Joint(readings, blocks, tied, ladder);
+        Set<String> exact = new HashSet<>();
+        eliminations.values().forEach(e -> {
+            Readings r = e.readings();
+            for (int i = 0; i < r.objects().size(); i++) {
+                if (r.exact(i)) {
+                    exact.add(r.objects().get(i));
+                }
+            }
+        });
+        return new Joint(readings, blocks, tied, exact, ladder);
     }
 
     private void addOwn() {

@@ -60,6 +60,7 @@ public final class Budget implements Shown {
         gains.variances()
                 .forEach((rung, variance) ->
                         terms.add(new Term("data of " + rung, rung, Kind.STATISTICAL, scale * variance)));
+        gains.joints().forEach((name, variance) -> terms.add(new Term(name, "", Kind.STATISTICAL, scale * variance)));
         terms.sort(Comparator.comparingDouble(Term::variance).reversed().thenComparing(Term::name));
         return new Budget(estimate, List.copyOf(terms), heldSigma);
     }

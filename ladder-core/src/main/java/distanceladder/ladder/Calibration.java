@@ -49,16 +49,38 @@ public final class Calibration implements Shown {
                 .filter(o -> settled.assembly().joint().sides(o).size() > 1
                         || settled.assembly().joint().held().contains(o))
                 .count();
-        String scatter = d.noise().scatter() == 0
-                ? ""
-                : "; scatter " + Figures.significant(unit(d).fromBase(d.noise().scatter()), 3) + " " + unit(d).symbol()
-                        + " (given)";
+        String scatter = scatter(settled.assembly().rows(rung), settled);
         long objects =
                 d.data().objects().stream().filter(o -> !o.isEmpty()).distinct().count();
         String title =
                 rung + " (" + d.description() + ")\n" + Figures.count(d.data().size(), "datum", "data") + " on "
                         + Figures.count(objects, "object", "objects") + ", " + met + " met in other rungs" + scatter;
         return new Calibration(title, List.copyOf(lines));
+    }
+
+    private static String scatter(Whitened white, Settled settled) {
+        Definition d = white.definition();
+        double variance = white.noise().scatter() * white.noise().scatter();
+        Double error = settled.scatterVariances().get(d.name());
+        String symbol = " " + unit(d).symbol();
+        if (white.noise().exact()) {
+            return "; declared exact";
+        }
+        if (error != null) {
+            double sigma = unit(d).fromBase(white.noise().scatter());
+            double half = variance == 0
+                    ? Math.sqrt(unit(d).fromBase(unit(d).fromBase(Math.sqrt(error))))
+                    : unit(d).fromBase(Math.sqrt(error) / (2 * white.noise().scatter()));
+            return "; scatter " + Figures.pair(sigma, half) + symbol + " (estimated by this set)";
+        }
+        if (d.noise().mode() == distanceladder.relation.Noise.Scatter.ESTIMATED) {
+            return "; scatter "
+                    + Figures.significant(unit(d).fromBase(white.noise().scatter()), 3) + symbol + " (taken over)";
+        }
+        return variance == 0
+                ? ""
+                : "; scatter "
+                        + Figures.significant(unit(d).fromBase(white.noise().scatter()), 3) + symbol + " (given)";
     }
 
     private static Unit unit(Definition d) {

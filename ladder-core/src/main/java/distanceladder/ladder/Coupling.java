@@ -1,5 +1,6 @@
 package distanceladder.ladder;
 
+import distanceladder.covariance.Covariance;
 import distanceladder.information.CoupledRows;
 import distanceladder.information.Readings;
 import distanceladder.information.Unknowns;
@@ -19,26 +20,18 @@ final class Coupling {
 
     CoupledRows rows(List<Whitened.BlockRows> blocks, List<String> met, List<Assembly.Supply> supply) {
         Unknowns unknowns = unknowns(blocks, met);
-        int size = blocks.stream().mapToInt(b -> b.data().length).sum();
-        double[][] noise = new double[size][size];
-        int from = 0;
         for (Whitened.BlockRows block : blocks) {
             addBlock(block, unknowns, supply);
-            double scatter = owner(block).scatter();
-            for (int i = 0; i < block.data().length; i++) {
-                for (int j = 0; j < block.data().length; j++) {
-                    noise[from + i][from + j] = block.noise().entry(i, j);
-                }
-                noise[from + i][from + i] += scatter * scatter;
-            }
-            from += block.data().length;
         }
+        double[][] noise = noise(blocks);
+        boolean[] exact = new boolean[noise.length + met.size()];
         for (String object : met) {
             Readings readings = assembly.readingsOf(object);
             int index = readings.index(object);
             objects.add(object);
             coefficients.add(readings.coefficient(index));
             rows.add(spread(readings.row(index), readings.unknowns(), unknowns));
+            exact[supply.size()] = readings.exact(index);
             supply.add(new Assembly.Supply("", -1, object));
         }
         return new CoupledRows(
@@ -46,7 +39,48 @@ final class Coupling {
                 objects.toArray(new String[0]),
                 coefficients.stream().mapToDouble(x -> x).toArray(),
                 rows.toArray(new double[0][]),
-                noise);
+                noise,
+                exact);
+    }
+
+    /** Each block's own noise, and the joint noise between all rows that have a part in it. */
+    private double[][] noise(List<Whitened.BlockRows> blocks) {
+        int size = blocks.stream().mapToInt(b -> b.data().length).sum();
+        double[][] noise = new double[size][size];
+        int from = 0;
+        for (Whitened.BlockRows block : blocks) {
+            for (int i = 0; i < block.data().length; i++) {
+                System.arraycopy(block.noise()[i], 0, noise[from + i], from, block.data().length);
+            }
+            from += block.data().length;
+        }
+        int row = 0;
+        for (Whitened.BlockRows block : blocks) {
+            int column = 0;
+            for (Whitened.BlockRows other : blocks) {
+                if (!block.link().isEmpty() && block.link().equals(other.link())) {
+                    addJoint(noise, row, column, block, other);
+                }
+                column += other.data().length;
+            }
+            row += block.data().length;
+        }
+        return noise;
+    }
+
+    private void addJoint(double[][] noise, int row, int column, Whitened.BlockRows block, Whitened.BlockRows other) {
+        Whitened one = owner(block);
+        Whitened two = owner(other);
+        Covariance c = one.definition().noise().joint().orElseThrow().covariance();
+        for (int i = 0; i < block.data().length; i++) {
+            int p = one.noise().jointRow(block.data()[i]);
+            for (int j = 0; p >= 0 && j < other.data().length; j++) {
+                int q = two.noise().jointRow(other.data()[j]);
+                if (q >= 0) {
+                    noise[row + i][column + j] += c.entry(p, q);
+                }
+            }
+        }
     }
 
     private Whitened owner(Whitened.BlockRows block) {

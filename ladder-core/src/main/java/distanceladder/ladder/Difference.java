@@ -3,7 +3,6 @@ package distanceladder.ladder;
 import distanceladder.covariance.Covariance;
 import distanceladder.relation.Definition;
 import distanceladder.relation.Input;
-import distanceladder.relation.Noise;
 import distanceladder.text.ValueFault;
 import java.util.HashMap;
 import java.util.List;
@@ -41,7 +40,35 @@ final class Difference {
         for (String rung : rungs) {
             sum += rung(rung);
         }
+        Set<String> joints = new TreeSet<>(a.jointGains().keySet());
+        joints.addAll(b.jointGains().keySet());
+        for (String name : joints) {
+            sum += joint(name);
+        }
         return sum;
+    }
+
+    /** A joint noise that both solutions have is one and the same. */
+    private double joint(String name) {
+        double[] g = a.jointGains().get(name);
+        double[] f = b.jointGains().get(name);
+        if (g == null || f == null || g.length != f.length) {
+            return a.joints().getOrDefault(name, 0.0) + b.joints().getOrDefault(name, 0.0);
+        }
+        return jointCovariance(name).quadratic(difference(g, f));
+    }
+
+    private Covariance jointCovariance(String name) {
+        for (Whitened white : b.settled().assembly().rows().values()) {
+            if (white.definition()
+                    .noise()
+                    .joint()
+                    .filter(j -> j.name().equals(name))
+                    .isPresent()) {
+                return white.definition().noise().joint().orElseThrow().covariance();
+            }
+        }
+        throw new IllegalStateException(name);
     }
 
     private Change.Meaning meaning(String name) {
@@ -85,9 +112,9 @@ final class Difference {
         if (f == null) {
             return quadratic(noise(a, name), g);
         }
-        Definition before = a.settled().ladder().rung(name).definition();
-        Definition after = b.settled().ladder().rung(name).definition();
-        if (before == after) {
+        Whitened before = a.settled().assembly().rows(name);
+        Whitened after = b.settled().assembly().rows(name);
+        if (before.definition() == after.definition()) {
             return quadratic(before.noise(), difference(g, f));
         }
         return matched(before, after, g, f);
@@ -100,8 +127,8 @@ final class Difference {
         return f;
     }
 
-    private static Noise noise(Gains gains, String rung) {
-        return gains.settled().ladder().rung(rung).definition().noise();
+    private static RungNoise noise(Gains gains, String rung) {
+        return gains.settled().assembly().rows(rung).noise();
     }
 
     private static double[] difference(double[] g, double[] f) {
@@ -112,12 +139,14 @@ final class Difference {
         return d;
     }
 
-    private static double quadratic(Noise noise, double[] g) {
-        return noise.covariance().quadratic(g) + noise.scatter() * noise.scatter() * Gains.squares(g);
+    private static double quadratic(RungNoise noise, double[] g) {
+        return noise.exact() ? 0 : noise.quadratic(g);
     }
 
     /** Data of two versions of a rung, matched by name. */
-    private double matched(Definition before, Definition after, double[] g, double[] f) {
+    private double matched(Whitened old, Whitened now, double[] g, double[] f) {
+        Definition before = old.definition();
+        Definition after = now.definition();
         Map<String, Integer> at = new HashMap<>();
         List<String> names = after.data().names();
         for (int i = 0; i < names.size(); i++) {
@@ -130,7 +159,7 @@ final class Difference {
         double updated = 0;
         for (int i = 0; i < g.length; i++) {
             Integer j = at.get(before.data().names().get(i));
-            boolean same = j != null && unchanged(before, after, i, j);
+            boolean same = j != null && unchanged(old, now, i, j);
             if (j != null && (same || meaning(before.name()) == Change.Meaning.WHAT_IF)) {
                 shared[j] = g[i];
                 sharedAfter[j] = f[j];
@@ -138,7 +167,7 @@ final class Difference {
             } else {
                 alone[i] = g[i];
                 if (j != null && meaning(before.name()) == Change.Meaning.UPDATED) {
-                    updated += 2 * g[i] * f[j] * updatedVariance(before, after, i, j);
+                    updated += 2 * g[i] * f[j] * updatedVariance(old, now, i, j);
                 }
             }
         }
@@ -149,11 +178,11 @@ final class Difference {
             for (int j = 0; j < all.length; j++) {
                 all[j] = moved[j] + aloneAfter[j];
             }
-            return quadratic(after.noise(), all);
+            return quadratic(now.noise(), all);
         }
-        return quadratic(after.noise(), moved)
-                + quadratic(before.noise(), alone)
-                + quadratic(after.noise(), aloneAfter)
+        return quadratic(now.noise(), moved)
+                + quadratic(old.noise(), alone)
+                + quadratic(now.noise(), aloneAfter)
                 - updated;
     }
 
@@ -166,24 +195,22 @@ final class Difference {
         return true;
     }
 
-    private static boolean unchanged(Definition before, Definition after, int i, int j) {
+    private static boolean unchanged(Whitened old, Whitened now, int i, int j) {
+        Definition before = old.definition();
+        Definition after = now.definition();
         return before.data().column(before.observable())[i] == after.data().column(after.observable())[j]
-                && variance(before, i) == variance(after, j);
+                && old.noise().total(i) == now.noise().total(j);
     }
 
-    private static double variance(Definition d, int i) {
-        Covariance c = d.noise().covariance();
-        return c.entry(i, i) + d.noise().scatter() * d.noise().scatter();
-    }
-
-    private static double updatedVariance(Definition before, Definition after, int i, int j) {
-        double old = variance(before, i);
-        double now = variance(after, j);
+    private static double updatedVariance(Whitened before, Whitened after, int i, int j) {
+        double old = before.noise().total(i);
+        double now = after.noise().total(j);
         if (now > old) {
+            Definition d = after.definition();
             throw new ValueFault(
-                    "variance of \"" + after.data().names().get(j) + "\" = " + now + ", before " + old,
+                    "variance of \"" + d.data().names().get(j) + "\" = " + now + ", before " + old,
                     "an update contains the old measurement, so its variance is not larger",
-                    "rung \"" + after.name() + "\"",
+                    "rung \"" + d.name() + "\"",
                     "call it remeasured if it is independent of the old one");
         }
         return now;

@@ -1,5 +1,6 @@
 package distanceladder.ladder;
 
+import distanceladder.fit.EffectiveDegrees;
 import distanceladder.information.Combination;
 import distanceladder.information.Unknowns;
 import distanceladder.relation.Derived;
@@ -99,6 +100,9 @@ final class Evaluation {
         for (double variance : gains.variances().values()) {
             statistical += variance;
         }
+        for (double variance : gains.joints().values()) {
+            statistical += variance;
+        }
         for (Input input : settled.ladder().inputs(settled.set()).values()) {
             double[] along = gains.sources().get(input.name());
             double variance = along == null ? 0 : Gains.squares(along);
@@ -115,6 +119,17 @@ final class Evaluation {
                 scale * q.sigma(),
                 scale * Math.sqrt(statistical),
                 scale * Math.sqrt(systematic),
+                degrees(q, gains),
                 value.unit());
+    }
+
+    /** Effective degrees of freedom: infinite when no scatter in the set was estimated. */
+    private double degrees(Stated q, Gains gains) {
+        List<EffectiveDegrees.Part> parts = new ArrayList<>();
+        settled.scatterVariances().forEach((rung, variance) -> {
+            double[] g = gains.data().getOrDefault(rung, new double[0]);
+            parts.add(new EffectiveDegrees.Part(Gains.squares(g), variance));
+        });
+        return EffectiveDegrees.of(q.variance(), parts);
     }
 }

@@ -17,14 +17,12 @@ final class Fit {
     private static final double ROUNDING = 1e-9;
 
     private final Settled settled;
-    private final Kept kept;
 
-    Fit(Settled settled, Kept kept) {
+    Fit(Settled settled) {
         this.settled = settled;
-        this.kept = kept;
     }
 
-    ChiSquare chiSquare() {
+    ChiSquare chiSquare(Kept kept) {
         List<ChiSquare.Line> lines = new ArrayList<>();
         double sum = 0;
         int degrees = 0;
@@ -32,7 +30,7 @@ final class Fit {
             if (!settled.set().contains(rung)) {
                 continue;
             }
-            ChiSquare.Line line = rung(rung);
+            ChiSquare.Line line = rung(rung, kept);
             lines.add(line);
             sum += line.value();
             degrees += line.degreesOfFreedom();
@@ -42,17 +40,17 @@ final class Fit {
                 lines, new ChiSquare.Line("rejoining", total.value() - sum, total.degreesOfFreedom() - degrees), total);
     }
 
-    private ChiSquare.Line rung(String name) {
+    private ChiSquare.Line rung(String name, Kept kept) {
         TreeSet<String> with = settled.ladder().downFrom(name);
         with.retainAll(settled.set());
         TreeSet<String> beneath = new TreeSet<>(with);
         beneath.remove(name);
         try {
-            Settled upper = at(with);
+            Settled upper = at(with, kept);
             if (beneath.isEmpty()) {
                 return new ChiSquare.Line(name, upper.chiSquare(), upper.degreesOfFreedom());
             }
-            Settled lower = at(beneath);
+            Settled lower = at(beneath, kept);
             return new ChiSquare.Line(
                     name, upper.chiSquare() - lower.chiSquare(), upper.degreesOfFreedom() - lower.degreesOfFreedom());
         } catch (RankFault fault) {
@@ -60,13 +58,13 @@ final class Fit {
         }
     }
 
-    private Settled at(TreeSet<String> set) {
+    private Settled at(TreeSet<String> set, Kept kept) {
         if (set.equals(settled.set())) {
             return settled;
         }
-        TreeMap<String, distanceladder.relation.Points> points = new TreeMap<>(settled.points());
-        points.keySet().retainAll(set);
-        return new Solver(settled.ladder(), set, kept).at(points);
+        TreeMap<String, Decided> decided = new TreeMap<>(settled.decided());
+        decided.keySet().retainAll(set);
+        return new Solver(settled.ladder(), set, kept, Map.of()).at(decided);
     }
 
     Residuals residuals(String rung) {
@@ -77,11 +75,8 @@ final class Fit {
         List<Residuals.Line> lines = new ArrayList<>();
         for (int i = 0; i < d.data().size(); i++) {
             Stated fitted = fitted(white, i);
-            Linearised linear = white.linear();
-            double right = linear.rows()[i][linear.unknowns().size()];
-            double residual = right - fitted.value();
-            double scatter = d.noise().scatter();
-            double variance = d.noise().covariance().entry(i, i) + scatter * scatter;
+            double residual = right(white, i) - fitted.value();
+            double variance = white.noise().total(i);
             double left = variance - fitted.variance();
             boolean checked = left > ROUNDING * variance;
             String object = d.data().objects().get(i);
@@ -95,10 +90,30 @@ final class Fit {
         return new Residuals(rung, unit, lines);
     }
 
+    private static double right(Whitened white, int datum) {
+        Linearised linear = white.linear();
+        return linear.rows()[datum][linear.unknowns().size()];
+    }
+
+    /** Residual of a datum, its carried errors taken out as far as they are known. */
+    double residual(Whitened white, int datum) {
+        return right(white, datum) - fittedWithCarried(white, datum).value();
+    }
+
     /** The left side of a datum's row at the solution. */
     private Stated fitted(Whitened white, int datum) {
         Linearised linear = white.linear();
-        Combination sum = settled.solved().combination(linear.unknowns(), linear.rows()[datum]);
+        return fitted(white, datum, settled.solved().combination(linear.unknowns(), linear.rows()[datum]));
+    }
+
+    /** The same with the errors that are carried as private unknowns. */
+    Stated fittedWithCarried(Whitened white, int datum) {
+        return fitted(white, datum, settled.solved().combination(white.unknowns(), white.raw(datum)));
+    }
+
+    private Stated fitted(Whitened white, int datum, Combination parameters) {
+        Linearised linear = white.linear();
+        Combination sum = parameters;
         Map<String, Double> distances = new HashMap<>();
         String object = white.definition().data().objects().get(datum);
         if (!object.isEmpty() && linear.coefficients()[datum] != 0) {

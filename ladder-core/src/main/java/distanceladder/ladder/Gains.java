@@ -1,10 +1,10 @@
 package distanceladder.ladder;
 
-import distanceladder.covariance.Block;
 import distanceladder.information.Coupled;
 import distanceladder.information.Elimination;
 import distanceladder.information.Readings;
 import distanceladder.information.Solved;
+import distanceladder.relation.JointNoise;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
@@ -22,6 +22,8 @@ final class Gains {
     private final TreeMap<String, double[]> sources = new TreeMap<>();
     private final TreeMap<String, double[]> data = new TreeMap<>();
     private final TreeMap<String, Double> variances = new TreeMap<>();
+    private final TreeMap<String, Double> joints = new TreeMap<>();
+    private final TreeMap<String, double[]> jointGains = new TreeMap<>();
 
     Gains(Stated q, Settled settled) {
         this.settled = settled;
@@ -36,6 +38,16 @@ final class Gains {
     /** For each rung the gains with respect to its observables, in the order of the table. */
     TreeMap<String, double[]> data() {
         return data;
+    }
+
+    /** For each joint noise the variance by it. */
+    TreeMap<String, Double> joints() {
+        return joints;
+    }
+
+    /** For each joint noise the gains of its data. */
+    TreeMap<String, double[]> jointGains() {
+        return jointGains;
     }
 
     /** For each rung the variance by its own data. */
@@ -77,6 +89,27 @@ final class Gains {
             assembly.joint().meetings().forEach(this::meeting);
             lone();
             assembly.rows().keySet().forEach(this::rung);
+            joint();
+        }
+
+        /** The variance by joint noises: of all rungs that take part at once. */
+        private void joint() {
+            Map<String, double[]> along = new TreeMap<>();
+            Map<String, JointNoise> noises = new TreeMap<>();
+            assembly.rows()
+                    .forEach((name, white) -> white.definition().noise().joint().ifPresent(noise -> {
+                        noises.put(noise.name(), noise);
+                        double[] g = along.computeIfAbsent(noise.name(), key -> new double[noise.size()]);
+                        for (int i = 0; i < gains(name).length; i++) {
+                            int row = white.noise().jointRow(i);
+                            if (row >= 0) {
+                                g[row] += gains(name)[i];
+                            }
+                        }
+                    }));
+            noises.forEach((name, noise) ->
+                    joints.put(name, noise.covariance().quadratic(along.getOrDefault(name, new double[noise.size()]))));
+            jointGains.putAll(along);
         }
 
         private double[] piece(String step, String where) {
@@ -197,7 +230,7 @@ final class Gains {
                 int datum = white.freeData()[k];
                 gains(name)[datum] += down[k] / white.sigma(datum);
             }
-            add(name, squares(down));
+            add(name, white.noise().exact() ? 0 : squares(down));
             if (white.tiedData().length > 0) {
                 double[] tied = Assembly.tied(white).down(piece(Log.HELD + " (ties)", name));
                 for (int k = 0; k < tied.length; k++) {
@@ -206,7 +239,7 @@ final class Gains {
                 add(name, squares(tied));
             }
             for (Whitened.BlockRows block : white.blocks()) {
-                add(name, blockVariance(block, gains(name), white.scatter()));
+                add(name, blockVariance(block, gains(name)));
             }
         }
 
@@ -223,14 +256,13 @@ final class Gains {
         }
     }
 
-    private static double blockVariance(Whitened.BlockRows rows, double[] gains, double scatter) {
-        Block block = rows.noise();
+    private static double blockVariance(Whitened.BlockRows rows, double[] gains) {
         int[] at = rows.data();
         double sum = 0;
         for (int i = 0; i < at.length; i++) {
-            double line = scatter * scatter * gains[at[i]];
+            double line = 0;
             for (int j = 0; j < at.length; j++) {
-                line += block.entry(i, j) * gains[at[j]];
+                line += rows.noise()[i][j] * gains[at[j]];
             }
             sum += gains[at[i]] * line;
         }

@@ -1,5 +1,6 @@
 package distanceladder.ladder;
 
+import distanceladder.text.ValueFault;
 import java.util.ArrayList;
 import java.util.Collection;
 import java.util.HashMap;
@@ -32,9 +33,14 @@ final class Joint {
     private final Map<String, Component> componentOf = new HashMap<>();
 
     /** The objects of a dense block that stand in it, with the rung that it belongs to. */
-    record BlockObjects(String block, String rung, Set<String> objects) {}
+    record BlockObjects(String block, String rung, String link, Set<String> objects) {}
 
-    Joint(Map<String, List<String>> readings, List<BlockObjects> blocks, Collection<String> tied, Ladder ladder) {
+    Joint(
+            Map<String, List<String>> readings,
+            List<BlockObjects> blocks,
+            Collection<String> tied,
+            Set<String> exact,
+            Ladder ladder) {
         Map<String, TreeSet<String>> speakers = new TreeMap<>();
         readings.forEach((rung, objects) -> objects.forEach(
                 o -> speakers.computeIfAbsent(o, key -> new TreeSet<>()).add(rung)));
@@ -42,6 +48,16 @@ final class Joint {
         for (BlockObjects block : blocks) {
             holdCalibrators(block, speakers, blocks, ladder);
         }
+        for (String object : tied) {
+            if (exact.contains(object)) {
+                throw new ValueFault(
+                        "object \"" + object + "\" is exact, and a row bears on it and on others",
+                        "an object of a row with several objects has a distance with an error",
+                        "object \"" + object + "\"",
+                        "give its exact distance an error, or take the object out of that row");
+            }
+        }
+        held.removeAll(exact);
         components(blocks);
         TreeMap<String, List<String>> found = new TreeMap<>();
         speakers.forEach((object, rungs) -> {
@@ -81,6 +97,12 @@ final class Joint {
         Map<String, Integer> first = new HashMap<>();
         for (int b = 0; b < root.length; b++) {
             root[b] = b;
+            if (!blocks.get(b).link.isEmpty()) {
+                Integer other = first.putIfAbsent("joint noise " + blocks.get(b).link, b);
+                if (other != null) {
+                    join(root, b, other);
+                }
+            }
             for (String object : blocks.get(b).objects) {
                 if (!held.contains(object)) {
                     Integer other = first.putIfAbsent(object, b);

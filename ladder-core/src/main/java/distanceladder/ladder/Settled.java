@@ -6,11 +6,14 @@ import distanceladder.information.Readings;
 import distanceladder.information.Solved;
 import distanceladder.information.Unknowns;
 import distanceladder.relation.Definition;
+import distanceladder.relation.Noise;
 import distanceladder.relation.Points;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.Set;
+import java.util.TreeMap;
 import java.util.TreeSet;
 
 /** A set of rungs, solved at the points at which it was linearised; distances are read back from the readings. */
@@ -19,15 +22,25 @@ final class Settled {
     private final TreeSet<String> set;
     private final Assembly assembly;
     private final Solved solved;
-    private final Map<String, Points> points;
+    private final Map<String, Decided> decided;
     private final Map<String, Coupled.Reading> coupled = new HashMap<>();
+    private final Map<String, Double> scatterVariances = new TreeMap<>();
+    private final Set<String> taken;
+    private final Map<String, double[]> componentWeights = new HashMap<>();
 
-    Settled(Ladder ladder, TreeSet<String> set, Assembly assembly, Solved solved, Map<String, Points> points) {
+    Settled(
+            Ladder ladder,
+            TreeSet<String> set,
+            Assembly assembly,
+            Solved solved,
+            Map<String, Decided> decided,
+            Set<String> taken) {
         this.ladder = ladder;
         this.set = set;
         this.assembly = assembly;
         this.solved = solved;
-        this.points = Map.copyOf(points);
+        this.taken = Set.copyOf(taken);
+        this.decided = Map.copyOf(decided);
     }
 
     TreeSet<String> set() {
@@ -42,8 +55,8 @@ final class Settled {
         return solved;
     }
 
-    Map<String, Points> points() {
-        return points;
+    Map<String, Decided> decided() {
+        return decided;
     }
 
     Ladder ladder() {
@@ -83,7 +96,47 @@ final class Settled {
 
     /** The present modulus, without its error. */
     double modulus(String object) {
-        return distance(object).value();
+        Joint joint = assembly.joint();
+        if (joint.held().contains(object) || !joint.inComponent(object)) {
+            return distance(object).value();
+        }
+        String name = joint.componentOf(object).name();
+        Coupled component = assembly.component(name);
+        return component.modulus(solved.values(component.unknowns()), weightedRows(name), object);
+    }
+
+    private synchronized double[] weightedRows(String component) {
+        return componentWeights.computeIfAbsent(component, key -> {
+            Coupled coupled = assembly.component(key);
+            return coupled.weighted(solved.values(coupled.unknowns()));
+        });
+    }
+
+    /** V^-1 times the residuals of a rung's data, in the order of its table; 0 for exact data. */
+    double[] weighted(String rung) {
+        Whitened white = assembly.rows(rung);
+        int n = white.definition().data().size();
+        double[] out = new double[n];
+        if (white.noise().exact()) {
+            return out;
+        }
+        Fit fit = new Fit(this);
+        for (int i : white.freeData()) {
+            out[i] = fit.residual(white, i) / white.noise().variance(i);
+        }
+        for (int i : white.tiedData()) {
+            out[i] = fit.residual(white, i) / white.noise().variance(i);
+        }
+        for (Joint.Component component : assembly.joint().components()) {
+            java.util.List<Assembly.Supply> supply = assembly.supply(component.name());
+            double[] rows = weightedRows(component.name());
+            for (int i = 0; i < rows.length; i++) {
+                if (supply.get(i).rung().equals(rung)) {
+                    out[supply.get(i).datum()] = rows[i];
+                }
+            }
+        }
+        return out;
     }
 
     synchronized Coupled.Reading reading(String object) {
@@ -116,8 +169,9 @@ final class Settled {
             return 0;
         }
         Readings readings = assembly.readingsOf(one);
-        double a = readings.coefficient(readings.index(one));
-        return 1 / (a * a);
+        int index = readings.index(one);
+        double a = readings.coefficient(index);
+        return readings.exact(index) ? 0 : 1 / (a * a);
     }
 
     /** Why an object that only one rung speaks of has no distance. */
@@ -137,11 +191,11 @@ final class Settled {
     }
 
     private Points points(String rung) {
-        Points found = points.get(rung);
+        Decided found = decided.get(rung);
         if (found == null) {
             throw new IllegalArgumentException(rung + " is not part of this solution");
         }
-        return found;
+        return found.points();
     }
 
     private Points withParameters(Whitened white, Points at) {
@@ -164,6 +218,18 @@ final class Settled {
             }
         }
         return reason;
+    }
+
+    /** For each rung whose scatter was estimated here, the variance of that estimate (of the squared scatter). */
+    synchronized Map<String, Double> scatterVariances() {
+        if (scatterVariances.isEmpty()) {
+            assembly.rows().forEach((rung, white) -> {
+                if (white.definition().noise().mode() == Noise.Scatter.ESTIMATED && !taken.contains(rung)) {
+                    scatterVariances.put(rung, new Restricted(this, rung).varianceOfEstimate());
+                }
+            });
+        }
+        return scatterVariances;
     }
 
     /** Chi-square over the set. */

@@ -30,13 +30,20 @@ public final class Solution implements Shown {
     private final Settled settled;
     private final Log log;
     private final Map<String, Change.Meaning> meanings;
+    private final Map<String, Double> scatters;
 
-    private Solution(Ladder ladder, TreeSet<String> set, Kept kept, Map<String, Change.Meaning> meanings) {
+    private Solution(
+            Ladder ladder,
+            TreeSet<String> set,
+            Kept kept,
+            Map<String, Change.Meaning> meanings,
+            Map<String, Double> scatters) {
+        this.scatters = Map.copyOf(scatters);
         this.ladder = ladder;
         this.set = set;
         this.kept = kept;
         this.meanings = Map.copyOf(meanings);
-        Solver solver = new Solver(ladder, set, kept);
+        Solver solver = new Solver(ladder, set, kept, scatters);
         this.settled = solver.solve();
         this.log = solver.log();
     }
@@ -46,12 +53,13 @@ public final class Solution implements Shown {
         this.set = same.set;
         this.kept = same.kept;
         this.meanings = same.meanings;
+        this.scatters = same.scatters;
         this.settled = same.settled;
         this.log = log;
     }
 
     static Solution of(Ladder ladder) {
-        return new Solution(ladder, new TreeSet<>(ladder.names()), Kept.empty(), Map.of());
+        return new Solution(ladder, new TreeSet<>(ladder.names()), Kept.empty(), Map.of(), Map.of());
     }
 
     /**
@@ -100,7 +108,44 @@ public final class Solution implements Shown {
      */
     public Solution over(java.util.Collection<String> rungs) {
         rungs.forEach(ladder::rung);
-        return new Solution(ladder, new TreeSet<>(rungs), kept, meanings);
+        return new Solution(ladder, new TreeSet<>(rungs), kept, meanings, scatters);
+    }
+
+    /**
+     * The same set with scatters taken over from another solution, where that has estimated or taken them: a scatter
+     * learned in the flow used for distances from below.
+     *
+     * @param other a solution with the rungs whose scatters are taken over
+     * @return the solution
+     */
+    public Solution withScattersOf(Solution other) {
+        Map<String, Double> taken = new HashMap<>(scatters);
+        for (String rung : other.set) {
+            if (set.contains(rung)
+                    && ladder.rung(rung).definition().noise().mode()
+                            == distanceladder.relation.Noise.Scatter.ESTIMATED) {
+                double scatter = other.settled.assembly().rows(rung).noise().scatter();
+                taken.put(rung, scatter * scatter);
+            }
+        }
+        return new Solution(ladder, set, kept, meanings, taken);
+    }
+
+    /**
+     * The intrinsic scatter of a rung: given, estimated by this set, or taken over.
+     *
+     * @param rung a rung of the set
+     * @return its standard deviation, with the error of an estimated one, in the unit of the rung's observable
+     */
+    public distanceladder.relation.Amount scatter(Rung<?> rung) {
+        requireInSet(rung.name());
+        Whitened white = settled.assembly().rows(rung.name());
+        distanceladder.astro.Unit unit =
+                white.definition().data().unit(white.definition().observable());
+        double scatter = white.noise().scatter();
+        double variance = settled.scatterVariances().getOrDefault(rung.name(), 0.0);
+        double sigma = variance == 0 || scatter == 0 ? 0 : Math.sqrt(variance) / (2 * scatter);
+        return new distanceladder.relation.Amount(unit.fromBase(scatter), Math.abs(unit.fromBase(sigma)), unit);
     }
 
     /**
@@ -183,7 +228,7 @@ public final class Solution implements Shown {
                 held.add(input.held());
             }
         }
-        return new Solver(ladder.withInputs(held), set, kept.next()).at(settled.points());
+        return new Solver(ladder.withInputs(held), set, kept.next(), scatters).at(settled.decided());
     }
 
     /**
@@ -192,7 +237,7 @@ public final class Solution implements Shown {
      * @return the parts
      */
     public ChiSquare chiSquare() {
-        return new Fit(settled, kept).chiSquare();
+        return new Fit(settled).chiSquare(kept);
     }
 
     /**
@@ -203,7 +248,7 @@ public final class Solution implements Shown {
      */
     public Residuals residuals(Rung<?> rung) {
         requireInSet(rung.name());
-        return new Fit(settled, kept).residuals(rung.name());
+        return new Fit(settled).residuals(rung.name());
     }
 
     private void requireInSet(String rung) {
@@ -292,7 +337,7 @@ public final class Solution implements Shown {
         Set<String> left = new HashSet<>(ladder.names());
         left.removeAll(set);
         rungs.removeAll(left);
-        Solution solution = new Solution(revised, rungs, kept.next(), next);
+        Solution solution = new Solution(revised, rungs, kept.next(), next, scatters);
         return new Solution(solution, solution.log.with(Restatement.between(this, solution)));
     }
 

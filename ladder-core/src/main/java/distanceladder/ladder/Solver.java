@@ -1,12 +1,13 @@
 package distanceladder.ladder;
 
+import distanceladder.fit.Damping;
 import distanceladder.information.Prior;
 import distanceladder.information.Solved;
 import distanceladder.ladder.Kept.Part;
 import distanceladder.relation.Definition;
 import distanceladder.relation.Input;
-import distanceladder.relation.Points;
 import distanceladder.text.ConvergenceFault;
+import distanceladder.text.Figures;
 import distanceladder.text.RankFault;
 import java.util.ArrayList;
 import java.util.List;
@@ -15,29 +16,31 @@ import java.util.TreeMap;
 import java.util.TreeSet;
 
 /**
- * Solves a set of rungs: linearise, solve, and again at the solution until the points stand still.
+ * Solves a set of rungs: linearise, solve, and again at the solution until all that is decided stands still.
  *
- * <p>Gauss-Newton iteration from a start that the data alone fix; nothing is taken over from another solution. A modulus
- * moves by at most {@link #LONGEST} in a step, and steps are shortened while a value swings to and fro (data far
- * from their relation make it do so). It has converged when no modulus moves by more than {@link #CLOSE} of its
- * reading's own error and no parameter by more than that of its standard deviation.
+ * <p>Gauss-Newton iteration from a start that the data alone fix; nothing is taken over from another solution, but for
+ * decisions that the user takes over by name. Steps are shortened while a value swings to and fro (data far from their
+ * relation make it do so).
  */
 final class Solver {
     static final int MOST = 200;
-    static final double CLOSE = 1e-10;
-    static final double LONGEST = 2.5;
-    private static final double SWING = 0.5;
-    private static final double LEAST_DAMPING = 1.0 / 64;
 
     private final Ladder ladder;
     private final TreeSet<String> set;
     private final Kept kept;
+    private final Map<String, Double> scatters;
     private final Log.Recorder log;
 
-    Solver(Ladder ladder, TreeSet<String> set, Kept kept) {
+    /**
+     * A solver of one set.
+     *
+     * @param scatters intrinsic variances taken over, by rung
+     */
+    Solver(Ladder ladder, TreeSet<String> set, Kept kept, Map<String, Double> scatters) {
         this.ladder = ladder;
         this.set = set;
         this.kept = kept;
+        this.scatters = scatters;
         this.log = new Log.Recorder(set.equals(ladder.names()) ? "whole" : String.join(" + ", set));
     }
 
@@ -45,52 +48,40 @@ final class Solver {
         return log.log();
     }
 
-    /** Decides the points by the set's own data. */
+    /** Decides by the set's own data. */
     Settled solve() {
-        TreeMap<String, Points> points = new TreeMap<>();
+        TreeMap<String, Decided> decided = new TreeMap<>();
         for (String name : set) {
             Definition d = ladder.rung(name).definition();
-            points.put(name, d.relation().start(d));
+            decided.put(name, new Decided(d.relation().start(d), Restricted.start(d, scatters.get(name))));
         }
-        String worst = "";
-        double farthest = 0;
-        double damping = 1;
+        Damping damping = new Damping();
+        Step step = null;
         for (int round = 0; round < MOST; round++) {
-            Settled now = at(points);
-            Step step = new Step(now, damping);
-            TreeMap<String, Points> next = new TreeMap<>();
-            points.forEach((name, old) -> next.put(name, step.next(name, old)));
-            if (step.farthest <= CLOSE) {
+            Settled now = at(decided);
+            step = new Step(now, damping.factor(), scatters.keySet());
+            TreeMap<String, Decided> next = new TreeMap<>();
+            for (Map.Entry<String, Decided> entry : decided.entrySet()) {
+                next.put(entry.getKey(), step.next(entry.getKey(), entry.getValue()));
+            }
+            if (step.atRest()) {
                 return now;
             }
-            damping = damped(damping, step, worst, farthest);
-            worst = step.worst;
-            farthest = step.signed;
-            points = next;
+            damping.note(step.worst(), step.move());
+            decided = next;
         }
+        String last = step == null ? "nothing" : step.worst();
+        double move = step == null ? 0 : Math.abs(step.move());
         throw new ConvergenceFault(
-                worst + " still moves by " + distanceladder.text.Figures.significant(Math.abs(farthest), 3)
-                        + " of its error",
-                "the points of linearisation stand still within " + MOST + " rounds",
+                last + " still moves by " + Figures.significant(move, 3) + " of its error",
+                "what is decided stands still within " + MOST + " rounds",
                 "solution over " + log.set(),
                 "check the datum, or start a parameter nearer to its value");
     }
 
-    /** Shorter steps while the unknown that moves most swings to and fro, longer ones while it creeps one way. */
-    private static double damped(double damping, Step step, String worst, double farthest) {
-        if (!step.worst.equals(worst)) {
-            return damping;
-        }
-        double ratio = step.signed / farthest;
-        if (ratio < -SWING) {
-            return Math.max(LEAST_DAMPING, damping / 2);
-        }
-        return ratio > SWING ? Math.min(1, damping * 1.5) : damping;
-    }
-
-    /** Solves at given points. */
-    Settled at(Map<String, Points> points) {
-        Assembly assembly = new Assembly(ladder, points, kept, log);
+    /** Solves with given decisions. */
+    Settled at(Map<String, Decided> decided) {
+        Assembly assembly = new Assembly(ladder, decided, kept, log);
         List<Part> parts = new ArrayList<>();
         parts.add(new Part("the merged triangle", assembly.merged()));
         List<Input> inputs = new ArrayList<>(ladder.inputs(set).values());
@@ -98,15 +89,9 @@ final class Solver {
         for (Input input : inputs) {
             parts.add(new Part("source " + input.name(), input));
         }
-        Solved solved = kept.keep(
-                new Log.Step(
-                        Log.SOLVE,
-                        log.set(),
-                        assembly.merged().triangle().unknowns().size()),
-                parts,
-                log,
-                () -> solve(assembly, inputs));
-        return new Settled(ladder, set, assembly, solved, points);
+        int width = assembly.merged().triangle().unknowns().size();
+        Solved solved = kept.keep(new Log.Step(Log.SOLVE, log.set(), width), parts, log, () -> solve(assembly, inputs));
+        return new Settled(ladder, set, assembly, solved, decided, scatters.keySet());
     }
 
     private Solved solve(Assembly assembly, List<Input> inputs) {
@@ -120,61 +105,6 @@ final class Solver {
         } catch (RankFault fault) {
             throw new RankFault(
                     fault.what(), fault.rule(), "solution over " + log.set(), fault.repair(), fault.parameters());
-        }
-    }
-
-    /** One step of the iteration, and how far it goes. */
-    private static final class Step {
-        private final Settled now;
-        private final double damping;
-        private double farthest;
-        private double signed;
-        private String worst = "";
-
-        Step(Settled now, double damping) {
-            this.now = now;
-            this.damping = damping;
-        }
-
-        Points next(String name, Points old) {
-            Whitened white = now.assembly().rows(name);
-            if (!white.linear().curved()) {
-                return old;
-            }
-            Definition d = white.definition();
-            double[] parameters = new double[old.parameterCount()];
-            for (int j = 0; j < parameters.length; j++) {
-                String unknown = white.linear().unknowns().name(j);
-                Stated value = now.unknown(unknown);
-                double move = value.value() - old.parameter(j);
-                double sigma = value.sigma();
-                parameters[j] = sigma == 0 ? value.value() : old.parameter(j) + damping * move;
-                note(unknown, sigma == 0 ? 0 : move / sigma);
-            }
-            double[] moduli = new double[old.size()];
-            for (int i = 0; i < moduli.length; i++) {
-                String object = d.data().objects().get(i);
-                moduli[i] = old.modulus(i);
-                if (!object.isEmpty() && now.refusal(object).isEmpty()) {
-                    moduli[i] = moved(object, old.modulus(i));
-                }
-            }
-            return Points.of(moduli, parameters);
-        }
-
-        private double moved(String object, double old) {
-            double to = now.modulus(object);
-            double move = damping * Math.max(-LONGEST, Math.min(LONGEST, to - old));
-            note(Ladder.unknown(object), (to - old) / now.ownError(object));
-            return old + move;
-        }
-
-        private void note(String what, double move) {
-            if (!(Math.abs(move) <= farthest)) {
-                farthest = Math.abs(move);
-                signed = move;
-                worst = what;
-            }
         }
     }
 }

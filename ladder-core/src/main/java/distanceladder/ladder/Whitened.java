@@ -1,13 +1,12 @@
 package distanceladder.ladder;
 
-import distanceladder.covariance.Block;
-import distanceladder.covariance.Split;
 import distanceladder.information.ObjectRows;
 import distanceladder.information.Prior;
 import distanceladder.information.Unknowns;
 import distanceladder.relation.Definition;
 import distanceladder.relation.Linearised;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.Comparator;
 import java.util.List;
 import java.util.stream.IntStream;
@@ -15,54 +14,50 @@ import java.util.stream.IntStream;
 /**
  * The rows of one rung, sorted by object and datum, divided by their errors where these are independent.
  *
- * <p>The noise is split: variances are divided out, rows of dense blocks stay raw, columns of a low-rank update are
- * carried as private unknowns of unit variance.
+ * <p>Rows of dense groups stay raw; columns of a low-rank update are carried as private unknowns of unit variance; exact
+ * rows are not divided.
  */
 final class Whitened {
-    /** Rows that share a dense block of noise, not divided by anything. */
-    record BlockRows(String name, int[] data, String[] objects, double[] coefficients, double[][] rows, Block noise) {}
+    /** Rows that share dense noise, not divided by anything; the noise is the rung's own part. */
+    record BlockRows(
+            String name,
+            String link,
+            int[] data,
+            String[] objects,
+            double[] coefficients,
+            double[][] rows,
+            double[][] noise) {}
 
     private final Definition definition;
     private final Linearised linear;
+    private final RungNoise noise;
     private final Unknowns unknowns;
-    private final int columns;
-    private final double[][] carried;
     private final ObjectRows free;
     private final int[] freeData;
-    private final double[] sigmas;
     private final List<BlockRows> blocks = new ArrayList<>();
     private final int[] tied;
 
-    Whitened(Definition definition, Linearised linear) {
+    Whitened(Definition definition, Linearised linear, double scatter) {
         this.definition = definition;
         this.linear = linear;
         int[] order = order();
-        Split split = definition.noise().covariance().part(order).split();
-        this.columns = split.columnCount();
+        this.noise = new RungNoise(definition, order, linear.extra(), scatter);
         List<String> all = new ArrayList<>(linear.unknowns().asList());
-        for (int q = 0; q < columns; q++) {
+        for (int q = 0; q < noise.columns(); q++) {
             all.add(privateName(q));
         }
         this.unknowns = Unknowns.of(all);
-        double[] variances = split.diagonal();
-        double scatter = definition.noise().scatter();
-        this.sigmas = new double[variances.length];
-        boolean[] inBlock = new boolean[variances.length];
-        double[][] columnsOf = split.columns();
-        this.carried = new double[order.length][];
-        for (int k = 0; k < order.length; k++) {
-            sigmas[order[k]] = Math.sqrt(variances[k] + scatter * scatter);
-            carried[order[k]] = columnsOf[k];
+        boolean[] grouped = new boolean[order.length];
+        for (RungNoise.Group group : noise.groups()) {
+            Arrays.stream(group.data()).forEach(i -> grouped[i] = true);
+            blocks.add(blockRows(group));
         }
-        for (Block block : split.blocks()) {
-            blocks.add(blockRows(block, order, inBlock));
+        int[] alone = IntStream.of(order).filter(i -> !grouped[i]).toArray();
+        for (int i : alone) {
+            noise.requireError(i, !object(i).isEmpty());
         }
-        freeData = IntStream.of(order)
-                .filter(i -> !inBlock[i] && linear.ties(i).isEmpty())
-                .toArray();
-        tied = IntStream.of(order)
-                .filter(i -> !inBlock[i] && !linear.ties(i).isEmpty())
-                .toArray();
+        freeData = IntStream.of(alone).filter(i -> linear.ties(i).isEmpty()).toArray();
+        tied = IntStream.of(alone).filter(i -> !linear.ties(i).isEmpty()).toArray();
         this.free = freeRows();
     }
 
@@ -86,14 +81,14 @@ final class Whitened {
     }
 
     /** A datum's parameters, carried columns and right side, on the unknowns of this rung. */
-    private double[] raw(int datum) {
+    double[] raw(int datum) {
         double[] from = linear.rows()[datum];
         double[] row = new double[unknowns.size() + 1];
         for (int j = 0; j < linear.unknowns().size(); j++) {
             row[unknowns.column(linear.unknowns().name(j))] = from[j];
         }
-        for (int q = 0; q < columns; q++) {
-            row[unknowns.column(privateName(q))] = carried[datum][q];
+        for (int q = 0; q < noise.columns(); q++) {
+            row[unknowns.column(privateName(q))] = noise.carried(datum, q);
         }
         row[unknowns.size()] = from[linear.unknowns().size()];
         return row;
@@ -104,13 +99,15 @@ final class Whitened {
         String[] objects = new String[n];
         double[] a = new double[n];
         double[][] rows = new double[n][];
+        boolean[] exact = new boolean[n];
+        Arrays.fill(exact, noise.exact());
         for (int k = 0; k < n; k++) {
             int i = freeData[k];
             objects[k] = object(i);
-            a[k] = linear.coefficients()[i] / sigmas[i];
-            rows[k] = divided(raw(i), sigmas[i]);
+            a[k] = linear.coefficients()[i] / sigma(i);
+            rows[k] = divided(raw(i), sigma(i));
         }
-        return ObjectRows.of(unknowns, objects, a, rows);
+        return ObjectRows.of(unknowns, objects, a, rows, exact);
     }
 
     private static double[] divided(double[] row, double sigma) {
@@ -120,26 +117,26 @@ final class Whitened {
         return row;
     }
 
-    private BlockRows blockRows(Block block, int[] order, boolean[] inBlock) {
-        int[] data = IntStream.of(block.indices()).map(k -> order[k]).toArray();
+    private BlockRows blockRows(RungNoise.Group group) {
+        int[] data = group.data();
         String[] objects = new String[data.length];
         double[] a = new double[data.length];
         double[][] rows = new double[data.length][];
         for (int k = 0; k < data.length; k++) {
-            int i = data[k];
-            inBlock[i] = true;
-            objects[k] = object(i);
-            a[k] = linear.coefficients()[i];
-            rows[k] = raw(i);
+            objects[k] = object(data[k]);
+            a[k] = linear.coefficients()[data[k]];
+            rows[k] = raw(data[k]);
         }
-        return new BlockRows(definition.name() + " block " + (blocks.size() + 1), data, objects, a, rows, block);
+        String link = group.joint() ? definition.noise().joint().orElseThrow().name() : "";
+        return new BlockRows(
+                definition.name() + " block " + (blocks.size() + 1), link, data, objects, a, rows, group.matrix());
     }
 
     /** Rows with a tie, divided by their errors, on the unknowns and the distances that they bear on. */
     double[][] tiedRows(Unknowns wider) {
         double[][] out = new double[tied.length][];
         for (int k = 0; k < tied.length; k++) {
-            out[k] = divided(tiedRow(tied[k], raw(tied[k]), wider), sigmas[tied[k]]);
+            out[k] = divided(tiedRow(tied[k], raw(tied[k]), wider), sigma(tied[k]));
         }
         return out;
     }
@@ -180,6 +177,10 @@ final class Whitened {
         return linear;
     }
 
+    RungNoise noise() {
+        return noise;
+    }
+
     Unknowns unknowns() {
         return unknowns;
     }
@@ -192,23 +193,19 @@ final class Whitened {
         return freeData;
     }
 
-    /** The error by which a datum outside all blocks was divided. */
+    /** The error by which a datum outside all groups was divided; 1 for an exact one. */
     double sigma(int datum) {
-        return sigmas[datum];
+        return noise.exact() ? 1 : Math.sqrt(noise.variance(datum));
     }
 
     List<BlockRows> blocks() {
         return blocks;
     }
 
-    double scatter() {
-        return definition.noise().scatter();
-    }
-
     /** Priors of the carried columns: independent, of unit variance. */
     List<Prior> priors() {
         List<Prior> out = new ArrayList<>();
-        for (int q = 0; q < columns; q++) {
+        for (int q = 0; q < noise.columns(); q++) {
             out.add(Prior.of(privateName(q), List.of(privateName(q)), new double[1], new double[][] {{1}}));
         }
         return out;

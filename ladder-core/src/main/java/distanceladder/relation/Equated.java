@@ -12,19 +12,24 @@ import java.util.function.ToDoubleFunction;
  * A relation given by an {@link Equation}.
  *
  * <p>Linearised about {@code (mu0, theta0)}: {@code a = dg/dmu}, {@code b = dg/dtheta}, {@code y = observed - g(mu0,
- * theta0) + a mu0 + b . theta0}. A known offset of the datum from its object (geometry) is added to mu before.
+ * theta0) + a mu0 + b . theta0}. A column x measured with an error is a private unknown of the datum, linearised at its own
+ * joint estimate x0 and eliminated: with {@code s = dg/dx} the row's variance grows by {@code s^2 Var(x)} and y by
+ * {@code -s (x - x0)}, so the slopes b are those at the estimate and not at the measured x. A known offset of the datum from its object (geometry) is added to mu before.
  */
 public final class Equated implements Relation {
     private final Equation equation;
     private final ToDoubleFunction<Datum> start;
     private final java.util.function.Function<Datum, Optional<String>> refusal;
     private final String offsetColumn;
+    private final List<String> uncertain;
 
     private Equated(
             Equation equation,
             ToDoubleFunction<Datum> start,
             java.util.function.Function<Datum, Optional<String>> refusal,
-            String offsetColumn) {
+            String offsetColumn,
+            List<String> uncertain) {
+        this.uncertain = uncertain;
         this.equation = equation;
         this.start = start;
         this.refusal = refusal;
@@ -38,7 +43,7 @@ public final class Equated implements Relation {
      * @return the relation
      */
     public static Equated of(Equation equation) {
-        return new Equated(equation, datum -> 0, datum -> Optional.empty(), "");
+        return new Equated(equation, datum -> 0, datum -> Optional.empty(), "", List.of());
     }
 
     /**
@@ -48,7 +53,7 @@ public final class Equated implements Relation {
      * @return the relation
      */
     public Equated startingAt(ToDoubleFunction<Datum> modulus) {
-        return new Equated(equation, modulus, refusal, offsetColumn);
+        return new Equated(equation, modulus, refusal, offsetColumn, uncertain);
     }
 
     /**
@@ -58,7 +63,7 @@ public final class Equated implements Relation {
      * @return the relation
      */
     public Equated refusing(java.util.function.Function<Datum, Optional<String>> reason) {
-        return new Equated(equation, start, reason, offsetColumn);
+        return new Equated(equation, start, reason, offsetColumn, uncertain);
     }
 
     /**
@@ -68,7 +73,26 @@ public final class Equated implements Relation {
      * @return the relation
      */
     public Equated withOffsets(String column) {
-        return new Equated(equation, start, refusal, column);
+        return new Equated(equation, start, refusal, column, uncertain);
+    }
+
+    /**
+     * The same relation with columns that were measured with an error, read by {@link Terms#uncertain}.
+     *
+     * @param columns their names; each has its errors in a column "{@code name} error"
+     * @return the relation
+     */
+    public Equated withUncertain(String... columns) {
+        return new Equated(equation, start, refusal, offsetColumn, List.of(columns));
+    }
+
+    /**
+     * The columns that were measured with an error.
+     *
+     * @return their names
+     */
+    public List<String> uncertain() {
+        return uncertain;
     }
 
     @Override
@@ -89,7 +113,14 @@ public final class Equated implements Relation {
             view.datum = i;
             moduli[i] = start.applyAsDouble(view);
         }
-        return Points.of(moduli, parameters);
+        double[][] covariates = new double[moduli.length][uncertain.size()];
+        for (int k = 0; k < uncertain.size(); k++) {
+            double[] measured = definition.data().column(uncertain.get(k));
+            for (int i = 0; i < measured.length; i++) {
+                covariates[i][k] = measured[i];
+            }
+        }
+        return Points.of(moduli, parameters).withCovariates(covariates);
     }
 
     static Unknowns unknownsOf(Definition definition) {
@@ -116,30 +147,65 @@ public final class Equated implements Relation {
     public Linearised linearise(Definition definition, Points at) {
         Observations data = definition.data();
         Unknowns unknowns = unknownsOf(definition);
-        int p = unknowns.size();
+        int n = data.size();
+        Errors errors = Errors.of(definition, uncertain);
         double[] observed = data.column(definition.observable());
-        double[] offsets = offsetColumn.isEmpty() ? new double[data.size()] : data.column(offsetColumn);
-        Row row = new Row(definition, unknowns, at);
-        double[] a = new double[data.size()];
-        double[][] rows = new double[data.size()][p + 1];
-        boolean curved = false;
-        for (int i = 0; i < a.length; i++) {
+        double[] offsets = offsetColumn.isEmpty() ? new double[n] : data.column(offsetColumn);
+        Row row = new Row(definition, unknowns, at, uncertain);
+        double[] a = new double[n];
+        double[][] rows = new double[n][];
+        double[] extra = new double[n];
+        double[][] shifts = new double[n][uncertain.size()];
+        boolean curved = !uncertain.isEmpty();
+        for (int i = 0; i < n; i++) {
             boolean bears = !data.objects().get(i).isEmpty();
             Dual g = equation.predict(row.begin(i, bears, offsets[i]), row);
-            double right = observed[i] - g.value();
-            if (bears) {
-                a[i] = g.partial(0);
-                right += a[i] * at.modulus(i);
+            a[i] = bears ? g.partial(0) : 0;
+            rows[i] = row(g, at, unknowns.size(), observed[i] - g.value() + a[i] * at.modulus(i));
+            for (int k = 0; k < uncertain.size(); k++) {
+                double slope = g.partial(1 + unknowns.size() + k);
+                rows[i][unknowns.size()] -= slope * (errors.measured(i, k) - at.covariate(i, k));
+                extra[i] += slope * slope * errors.variance(i, k);
+                shifts[i][k] = -slope * errors.variance(i, k);
             }
-            for (int j = 0; j < p; j++) {
-                rows[i][j] = g.partial(j + 1);
-                right += rows[i][j] * at.parameter(j);
-            }
-            rows[i][p] = right;
-            requireFinite(definition, i, right);
+            requireFinite(definition, i, rows[i][unknowns.size()]);
             curved |= g.curved();
         }
-        return new Linearised(unknowns, a, rows, List.of(), curved);
+        return new Linearised(unknowns, a, rows, List.of(), curved, extra, shifts);
+    }
+
+    private static double[] row(Dual g, Points at, int p, double right) {
+        double[] row = new double[p + 1];
+        row[p] = right;
+        for (int j = 0; j < p; j++) {
+            row[j] = g.partial(j + 1);
+            row[p] += row[j] * at.parameter(j);
+        }
+        return row;
+    }
+
+    /** Measured numbers and variances of the uncertain columns. */
+    private record Errors(double[][] columns, double[][] sigmas) {
+        static Errors of(Definition definition, List<String> names) {
+            double[][] columns = new double[names.size()][];
+            double[][] sigmas = new double[names.size()][];
+            for (int k = 0; k < columns.length; k++) {
+                String name = names.get(k);
+                columns[k] = definition.data().column(name);
+                sigmas[k] = definition
+                        .data()
+                        .errors(name + " error", definition.data().unit(name));
+            }
+            return new Errors(columns, sigmas);
+        }
+
+        double measured(int datum, int k) {
+            return columns[k][datum];
+        }
+
+        double variance(int datum, int k) {
+            return sigmas[k][datum] * sigmas[k][datum];
+        }
     }
 
     private static void requireFinite(Definition definition, int datum, double right) {
@@ -166,15 +232,17 @@ public final class Equated implements Relation {
         private final Unknowns unknowns;
         private final Points at;
         private final Tape tape;
+        private final List<String> uncertain;
         private final java.util.Map<String, Integer> indices = new java.util.HashMap<>();
         private final java.util.Map<String, double[]> columns = new java.util.HashMap<>();
         private int datum;
 
-        Row(Definition definition, Unknowns unknowns, Points at) {
+        Row(Definition definition, Unknowns unknowns, Points at, List<String> uncertain) {
+            this.uncertain = uncertain;
             this.definition = definition;
             this.unknowns = unknowns;
             this.at = at;
-            this.tape = new Tape(unknowns.size() + 1);
+            this.tape = new Tape(1 + unknowns.size() + uncertain.size());
         }
 
         Dual begin(int index, boolean bears, double offset) {
@@ -196,6 +264,19 @@ public final class Equated implements Relation {
                 indices.put(role, index);
             }
             return tape.variable(index + 1, at.parameter(index));
+        }
+
+        @Override
+        public Dual uncertain(String column) {
+            int k = uncertain.indexOf(column);
+            if (k < 0) {
+                throw new NameFault(
+                        "uncertain column \"" + column + "\"",
+                        "a relation says beforehand which columns it reads as uncertain",
+                        "rung \"" + definition.name() + "\"",
+                        "name it in withUncertain; " + Nearest.hint(column, uncertain));
+            }
+            return tape.variable(1 + unknowns.size() + k, at.covariate(datum, k));
         }
 
         @Override

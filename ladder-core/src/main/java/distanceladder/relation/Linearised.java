@@ -11,9 +11,18 @@ import java.util.List;
  * @param rows for each datum the factors of the parameters and the right side
  * @param ties for each datum the further objects that it bears on, mostly none; empty when no datum has any
  * @param curved whether the rows depend on the point of linearisation
+ * @param extra for each datum the variance that its uncertain columns add
+ * @param shifts for each datum and uncertain column the covariance of the column's error with the row's: by it the column
+ *     is re-estimated from the row's residual; no column when none is uncertain
  */
 public record Linearised(
-        Unknowns unknowns, double[] coefficients, double[][] rows, List<List<Tie>> ties, boolean curved) {
+        Unknowns unknowns,
+        double[] coefficients,
+        double[][] rows,
+        List<List<Tie>> ties,
+        boolean curved,
+        double[] extra,
+        double[][] shifts) {
 
     /**
      * A further object in a row that bears on several.

@@ -3,17 +3,20 @@ package distanceladder.relation;
 import java.util.Arrays;
 
 /**
- * Where a rung's relation is linearised: the modulus at each datum's object, and its parameters.
+ * Where a rung's relation is linearised: the modulus at each datum's object, its parameters, and its
+ * uncertain columns.
  *
  * <p>Equal only when all numbers have the same bits.
  */
 public final class Points {
     private final double[] moduli;
     private final double[] parameters;
+    private final double[][] covariates;
 
-    private Points(double[] moduli, double[] parameters) {
+    private Points(double[] moduli, double[] parameters, double[][] covariates) {
         this.moduli = moduli;
         this.parameters = parameters;
+        this.covariates = covariates;
     }
 
     /**
@@ -24,7 +27,38 @@ public final class Points {
      * @return the point
      */
     public static Points of(double[] moduli, double[] parameters) {
-        return new Points(moduli.clone(), parameters.clone());
+        return new Points(moduli.clone(), parameters.clone(), new double[moduli.length][0]);
+    }
+
+    /**
+     * The same point with estimates of uncertain columns.
+     *
+     * @param values for each datum one number for each uncertain column
+     * @return the point
+     */
+    public Points withCovariates(double[][] values) {
+        return new Points(
+                moduli, parameters, Arrays.stream(values).map(double[]::clone).toArray(double[][]::new));
+    }
+
+    /**
+     * One uncertain column's estimate.
+     *
+     * @param datum index in the table
+     * @param column index among the uncertain columns
+     * @return the estimate in base units
+     */
+    public double covariate(int datum, int column) {
+        return covariates[datum][column];
+    }
+
+    /**
+     * How many uncertain columns there are.
+     *
+     * @return number of columns
+     */
+    public int covariateCount() {
+        return covariates.length == 0 ? 0 : covariates[0].length;
     }
 
     /**
@@ -70,11 +104,12 @@ public final class Points {
         return this == other
                 || (other instanceof Points that
                         && Arrays.equals(moduli, that.moduli)
-                        && Arrays.equals(parameters, that.parameters));
+                        && Arrays.equals(parameters, that.parameters)
+                        && Arrays.deepEquals(covariates, that.covariates));
     }
 
     @Override
     public int hashCode() {
-        return 31 * Arrays.hashCode(moduli) + Arrays.hashCode(parameters);
+        return 31 * (31 * Arrays.hashCode(moduli) + Arrays.hashCode(parameters)) + Arrays.deepHashCode(covariates);
     }
 }

@@ -79,6 +79,44 @@ public interface Rung<R extends Rung<R>> extends Shown {
     }
 
     /**
+     * The same rung with an intrinsic scatter that the set that is solved estimates by restricted maximum likelihood.
+     *
+     * @return the rung
+     */
+    default R withEstimatedScatter() {
+        return like(definition().withNoise(definition().noise().withEstimatedScatter()));
+    }
+
+    /**
+     * The same rung with equal errors of a size that the residuals tell: an unweighted fit.
+     *
+     * @return the rung
+     */
+    default R withEqualUnknownErrors() {
+        return like(
+                definition().withNoise(Noise.equalUnknown(definition().data().size())));
+    }
+
+    /**
+     * The same rung with its data declared exact: each fixes its object's distance.
+     *
+     * @return the rung
+     */
+    default R withoutErrors() {
+        return like(definition().withNoise(Noise.exact(definition().data().size())));
+    }
+
+    /**
+     * The same rung with errors in common with other rungs, added to its own.
+     *
+     * @param joint the joint noise, the same object in each rung that takes part
+     * @return the rung
+     */
+    default R withJointNoise(JointNoise joint) {
+        return like(definition().withNoise(definition().noise().with(joint)));
+    }
+
+    /**
      * The same rung without some data.
      *
      * @param data names of data to leave out

@@ -164,7 +164,7 @@ public final class Tabulated implements Relation {
                 rows[i][j] += column[i];
             }
         });
-        return new Linearised(unknowns, a, rows, tied ? ties : List.of(), false);
+        return new Linearised(unknowns, a, rows, tied ? ties : List.of(), false, new double[size], new double[size][0]);
     }
 
     private double coefficient(String object, int datum) {

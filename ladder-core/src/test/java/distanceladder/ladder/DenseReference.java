@@ -2,6 +2,7 @@ package distanceladder.ladder;
 
 import distanceladder.relation.Definition;
 import distanceladder.relation.Input;
+import distanceladder.relation.JointNoise;
 import distanceladder.relation.Linearised;
 import java.util.ArrayList;
 import java.util.HashMap;
@@ -35,10 +36,7 @@ final class DenseReference {
         nameColumns(settled, inputs);
         int p = columns.size();
         int directions = 0;
-        for (String rung : settled.set()) {
-            Whitened white = settled.assembly().rows(rung);
-            whiten(white.definition(), white.linear(), inputs, rows, rights);
-        }
+        whiten(settled, rows, rights);
         for (Input input : inputs.values()) {
             if (!input.free()) {
                 for (int k = 0; k < input.root()[0].length; k++) {
@@ -96,34 +94,68 @@ final class DenseReference {
         }
     }
 
-    private void whiten(
-            Definition d, Linearised linear, Map<String, Input> inputs, List<double[]> rows, List<Double> rights) {
-        int n = d.data().size();
-        double[][] raw = new double[n][columns.size() + 1];
-        for (int i = 0; i < n; i++) {
-            for (int j = 0; j < linear.unknowns().size(); j++) {
-                place(raw[i], linear.unknowns().name(j), linear.rows()[i][j]);
-            }
-            raw[i][columns.size()] += linear.rows()[i][linear.unknowns().size()];
-            String object = d.data().objects().get(i);
-            if (!object.isEmpty()) {
-                raw[i][columns.get(Ladder.unknown(object))] += linear.coefficients()[i];
-            }
-            for (Linearised.Tie tie : linear.ties(i)) {
-                raw[i][columns.get(Ladder.unknown(tie.object()))] += tie.coefficient();
+    private void whiten(Settled settled, List<double[]> rows, List<Double> rights) {
+        List<Whitened> owners = new ArrayList<>();
+        List<Integer> data = new ArrayList<>();
+        for (String rung : settled.set()) {
+            Whitened white = settled.assembly().rows(rung);
+            for (int i = 0; i < white.definition().data().size(); i++) {
+                owners.add(white);
+                data.add(i);
             }
         }
-        double[][] c = d.noise().covariance().toArray();
+        int n = data.size();
+        double[][] raw = new double[n][];
+        double[][] c = new double[n][n];
         for (int i = 0; i < n; i++) {
-            c[i][i] += d.noise().scatter() * d.noise().scatter();
+            raw[i] = raw(owners.get(i), data.get(i));
+            for (int j = 0; j < n; j++) {
+                c[i][j] = covariance(owners.get(i), data.get(i), owners.get(j), data.get(j));
+            }
         }
         RealMatrix l = new CholeskyDecomposition(new Array2DRowRealMatrix(c), 1e-8, 1e-30).getL();
-        RealMatrix white = new LUDecomposition(l).getSolver().solve(new Array2DRowRealMatrix(raw));
+        RealMatrix white = new LUDecomposition(l, 0).getSolver().solve(new Array2DRowRealMatrix(raw));
         for (int i = 0; i < n; i++) {
             double[] row = white.getRow(i);
             rows.add(java.util.Arrays.copyOf(row, row.length - 1));
             rights.add(row[row.length - 1]);
         }
+    }
+
+    private double[] raw(Whitened white, int i) {
+        Linearised linear = white.linear();
+        double[] raw = new double[columns.size() + 1];
+        for (int j = 0; j < linear.unknowns().size(); j++) {
+            place(raw, linear.unknowns().name(j), linear.rows()[i][j]);
+        }
+        raw[columns.size()] += linear.rows()[i][linear.unknowns().size()];
+        String object = white.definition().data().objects().get(i);
+        if (!object.isEmpty()) {
+            raw[columns.get(Ladder.unknown(object))] += linear.coefficients()[i];
+        }
+        for (Linearised.Tie tie : linear.ties(i)) {
+            raw[columns.get(Ladder.unknown(tie.object()))] += tie.coefficient();
+        }
+        return raw;
+    }
+
+    private static double covariance(Whitened a, int i, Whitened b, int j) {
+        double sum = 0;
+        if (a == b) {
+            sum += a.definition().noise().covariance().entry(i, j);
+            if (i == j) {
+                sum += a.noise().scatter() * a.noise().scatter() + a.linear().extra()[i];
+            }
+        }
+        JointNoise joint = a.definition().noise().joint().orElse(null);
+        if (joint != null && b.definition().noise().joint().orElse(null) == joint) {
+            int p = joint.row(
+                    a.definition().name(), a.definition().data().names().get(i));
+            int q = joint.row(
+                    b.definition().name(), b.definition().data().names().get(j));
+            sum += p < 0 || q < 0 ? 0 : joint.covariance().entry(p, q);
+        }
+        return sum;
     }
 
     private void place(double[] row, String unknown, double coefficient) {

@@ -58,7 +58,8 @@ class DenseReferenceProperties {
                         unknowns.get(i) + " with " + unknowns.get(j));
             }
             Gains gains = new Gains(values.get(i), settled);
-            double sum = gains.variances().values().stream().mapToDouble(x -> x).sum();
+            double sum = gains.variances().values().stream().mapToDouble(x -> x).sum()
+                    + gains.joints().values().stream().mapToDouble(x -> x).sum();
             for (Input input : solution.ladder().inputs(settled.set()).values()) {
                 sum += Gains.squares(gains.sources().getOrDefault(input.name(), new double[0]));
             }

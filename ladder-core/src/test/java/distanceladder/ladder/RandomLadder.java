@@ -8,6 +8,7 @@ import distanceladder.covariance.Diagonal;
 import distanceladder.covariance.LowRankUpdate;
 import distanceladder.covariance.Sum;
 import distanceladder.relation.Amount;
+import distanceladder.relation.JointNoise;
 import distanceladder.relation.Noise;
 import distanceladder.relation.Observations;
 import distanceladder.relation.Rung;
@@ -35,6 +36,9 @@ final class RandomLadder {
         MANY_DATA_ON_AN_OBJECT,
         CORRELATED_SOURCES,
         SEMIDEFINITE_SOURCES,
+        TWO_BLOCKS_ON_THE_SAME_TARGETS,
+        OBJECT_WITH_TWO_ROWS_IN_A_BLOCK,
+        BLOCK_OVER_TWO_RUNGS,
         CURVED
     }
 
@@ -89,19 +93,44 @@ final class RandomLadder {
         }
         Own right = rung("right", with(hosts(4, 7), targets(6, 13)), 2, false).calibratedBy(base);
         features.add(Feature.DIAMOND);
+        if (random.nextInt(3) == 0) {
+            JointNoise joint = joint(left, right);
+            left = left.withJointNoise(joint);
+            right = right.withJointNoise(joint);
+            features.add(Feature.BLOCK_OVER_TWO_RUNGS);
+        }
         Rung<?> top = right;
         if (random.nextBoolean()) {
             top = rung("upper", with(targets(8, 12), targets(12, 17)), 1, false).calibratedBy(right);
             features.add(Feature.LONG_REJOINING);
         }
         boolean disjoint = random.nextBoolean();
+        boolean flowBlock = random.nextBoolean();
+        boolean secondBlock = flowBlock && random.nextBoolean();
         List<String> flowObjects = disjoint ? targets(0, 5) : targets(1, 12);
-        Own flow = rung("flow", flowObjects, 1, !block && random.nextBoolean()).calibratedBy(left, top);
-        Own second = rung("second flow", disjoint ? targets(5, 12) : targets(3, 14), 1, false)
+        Own flow = rung("flow", flowObjects, 2, flowBlock).calibratedBy(left, top);
+        Own second = rung("second flow", disjoint ? targets(5, 12) : targets(3, 14), 1, secondBlock)
                 .calibratedBy(left, top);
+        if (flowBlock) {
+            features.add(Feature.OBJECT_WITH_TWO_ROWS_IN_A_BLOCK);
+        }
+        if (block && flowBlock || secondBlock && !disjoint) {
+            features.add(Feature.TWO_BLOCKS_ON_THE_SAME_TARGETS);
+        }
         features.add(disjoint && block ? Feature.DISJOINT_TARGETS_OF_ONE_BLOCK : Feature.SAME_TARGETS_TWICE_ABOVE);
         features.add(Feature.OBJECT_IN_TWO_BRANCHES_AND_FLOW);
         return random.nextBoolean() ? Ladder.of(flow, second) : Ladder.of(second, flow);
+    }
+
+    /** A dense block over some data of two rungs. */
+    private JointNoise joint(Own left, Own right) {
+        List<String> some = left.definition().data().names().subList(1, 9);
+        List<String> others = right.definition().data().names().subList(0, 7);
+        int n = some.size() + others.size();
+        return JointNoise.named("survey")
+                .on("left", some)
+                .on("right", others)
+                .with(LowRankUpdate.of(Diagonal.fromVariances(new double[n]), columns(n, 3, 0.1)));
     }
 
     private static List<String> hosts(int from, int to) {
