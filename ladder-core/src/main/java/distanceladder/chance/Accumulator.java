@@ -1,6 +1,7 @@
 package distanceladder.chance;
 
 import distanceladder.text.ValueFault;
+import org.jspecify.annotations.Nullable;
 
 /**
  * Mean and covariance of vectors that stream by, without keeping them.
@@ -11,7 +12,7 @@ import distanceladder.text.ValueFault;
  * 1983). No cancellation, whatever the mean. Merging is associative in exact arithmetic and not in bits: for the same
  * bits, cut the stream at the same places and merge in the same order.
  *
- * <p>Mutable, for one thread. Cost: d^2/2 numbers and as many operations a vector.
+ * <p>Mutable, for one thread. Cost: l^2/2 numbers, and as many operations a vector, for vectors of length l.
  */
 public final class Accumulator {
     private final double[] mean;
@@ -84,7 +85,7 @@ public final class Accumulator {
         }
     }
 
-    private void add(double[] otherMean, long otherCount, double @org.jspecify.annotations.Nullable [] otherSpread) {
+    private void add(double[] otherMean, long otherCount, double @Nullable [] otherSpread) {
         double total = (double) count + otherCount;
         double share = otherCount / total;
         double weight = count * share;

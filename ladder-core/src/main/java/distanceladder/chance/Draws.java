@@ -12,7 +12,7 @@ import distanceladder.text.ValueFault;
  * <p>Words are those of Philox 4x64-10 (Salmon, Moraes, Dror and Shaw 2011, Parallel random numbers: as easy as 1, 2,
  * 3) with the key (seed, hash of name) and the counter (index / 4, k, 0, 0), of which the word index mod 4 is given.
  * The hash is FNV-1a of 64 bits over the UTF-16 code units, high byte first, then the finaliser of SplitMix64; two
- * given names share a hash with a chance of 5e-20. Cost: about 20 ns a number; the four words of one counter cost
+ * given names share a hash with a chance of 5e-20. Cost: some tens of nanoseconds a number; the four words of one counter cost
  * little more than one ({@link #fill}).
  */
 public final class Draws {

@@ -6,6 +6,7 @@ package distanceladder.chance;
  * <p>Wichura (1988), Applied Statistics 37, 477, algorithm AS 241, routine PPND16: rational functions in three regions,
  * about 1 part in 1e16 by its author. StrictMath.log and square roots: the same bits on every Java.
  */
+// the coefficients have the digits in which they were published
 @SuppressWarnings("FloatingPointLiteralPrecision")
 final class NormalQuantile {
     private static final double[] CENTRE_ABOVE = {

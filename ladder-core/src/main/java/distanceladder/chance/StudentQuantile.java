@@ -11,11 +11,15 @@ import org.hipparchus.special.Beta;
  * with many degrees of freedom loses half of the digits by it.
  */
 final class StudentQuantile {
-    private static final double NEARLY_NORMAL = 1e5;
+    private static final double MANY = 2000;
+    private static final double EXPANSION = 4e-3;
     private static final double CENTRE = 0.25;
     private static final double TINY = 1e-300;
     private static final double EPSILON = 0x1p-52;
     private static final int STEPS = 100;
+    /** A step below this leaves an error of its square. */
+    private static final double LAST_STEP = 1e-9;
+
     private static final int FRACTION_STEPS = 10_000;
 
     private final double dof;
@@ -33,8 +37,9 @@ final class StudentQuantile {
         if (p == 0.5) {
             return 0;
         }
-        if (dof > NEARLY_NORMAL) {
-            return expanded(NormalQuantile.at(p), dof);
+        double normal = NormalQuantile.at(p);
+        if (dof > MANY && normal * normal < EXPANSION * dof) {
+            return expanded(normal, dof);
         }
         double tail = Math.min(p, 1 - p);
         StudentQuantile student = new StudentQuantile(dof);
@@ -42,7 +47,7 @@ final class StudentQuantile {
         return p < 0.5 ? -size : size;
     }
 
-    /** Abramowitz and Stegun (1964), equation 26.7.5. */
+    /** Abramowitz and Stegun (1964), equation 26.7.5; the next term is below 1e-16 where this is used. */
     private static double expanded(double x, double dof) {
         double s = x * x;
         double first = (s + 1) / 4;
@@ -61,7 +66,7 @@ final class StudentQuantile {
             double slope = StrictMath.exp(u + logDensity(u) - logTail);
             double change = (logTail - target) / slope;
             u += change;
-            if (Math.abs(change) <= 2 * EPSILON * Math.max(1, Math.abs(u))) {
+            if (Math.abs(change) <= LAST_STEP) {
                 break;
             }
         }
@@ -75,7 +80,7 @@ final class StudentQuantile {
             double u = StrictMath.log(x);
             double change = (centre - StrictMath.exp(logCentre(u))) / (2 * StrictMath.exp(logDensity(u)));
             x += change;
-            if (Math.abs(change) <= 2 * EPSILON * x) {
+            if (Math.abs(change) <= LAST_STEP * x) {
                 break;
             }
         }
@@ -121,7 +126,7 @@ final class StudentQuantile {
         double c = 1;
         double d = 0;
         for (int n = 1; n < FRACTION_STEPS; n++) {
-            double m = Math.floor(0.5 * n);
+            int m = n / 2;
             double term = n % 2 == 0
                     ? m * (b - m) * y / ((a + 2 * m - 1) * (a + 2 * m))
                     : -(a + m) * (a + b + m) * y / ((a + 2 * m) * (a + 2 * m + 1));

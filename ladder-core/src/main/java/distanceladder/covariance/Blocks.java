@@ -43,17 +43,19 @@ public final class Blocks implements Covariance {
      * @throws ValueFault if there are more values than an index can count
      */
     public static Blocks of(Covariance... parts) {
+        long count = 0;
+        for (Covariance part : parts) {
+            count += part.size();
+        }
+        if (count > Integer.MAX_VALUE) {
+            throw new ValueFault(count + " values", "a covariance has fewer than 2^31", KIND, "use fewer blocks");
+        }
         int[][] places = new int[parts.length][];
-        long next = 0;
+        int next = 0;
         for (int k = 0; k < parts.length; k++) {
-            int size = parts[k].size();
-            if (next + size > Integer.MAX_VALUE) {
-                throw new ValueFault(
-                        (next + size) + " values", "a covariance has fewer than 2^31", KIND, "use fewer blocks");
-            }
-            places[k] = new int[size];
-            for (int i = 0; i < size; i++) {
-                places[k][i] = (int) next++;
+            places[k] = new int[parts[k].size()];
+            for (int i = 0; i < places[k].length; i++) {
+                places[k][i] = next++;
             }
         }
         return new Blocks(parts.clone(), places);

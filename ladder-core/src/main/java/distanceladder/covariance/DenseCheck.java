@@ -86,6 +86,9 @@ final class DenseCheck {
     }
 
     private void definite() {
+        if (Definite.overwriting(unit(entries, sigmas))) {
+            return;
+        }
         PivotedCholesky.Remainder remainder =
                 PivotedCholesky.of(unit(entries, sigmas)).remainder();
         if (remainder.pivot() < -PivotedCholesky.tolerance(sigmas.length)) {

@@ -82,7 +82,10 @@ public final class LowRankUpdate implements Covariance {
     public double entry(int i, int j) {
         Border.index(i, columns.length, KIND);
         Border.index(j, columns.length, KIND);
-        return base.entry(i, j) + kernel.bilinear(columns[Math.max(i, j)], columns[Math.min(i, j)]);
+        double[] u = columns[i];
+        double[] v = columns[j];
+        // in an order of their own, so that neither (j, i) nor a reordered part changes a bit
+        return base.entry(i, j) + (Arrays.compare(u, v) < 0 ? kernel.bilinear(u, v) : kernel.bilinear(v, u));
     }
 
     @Override

@@ -1,5 +1,7 @@
 package distanceladder.covariance;
 
+import java.util.Arrays;
+
 /**
  * Cholesky factorisation with complete pivoting, {@code P A PT = L LT}, of a matrix whose diagonal is 1 (or 0, with a
  * row of zeros), stopped where the largest remaining pivot is at most 10 n eps.
@@ -108,7 +110,7 @@ final class PivotedCholesky {
     double[][] factor() {
         double[][] factor = new double[order.length][];
         for (int i = 0; i < order.length; i++) {
-            factor[order[i]] = java.util.Arrays.copyOf(rows[i], rank);
+            factor[order[i]] = Arrays.copyOf(rows[i], rank);
         }
         return factor;
     }
