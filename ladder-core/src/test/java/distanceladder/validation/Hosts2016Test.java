@@ -31,7 +31,7 @@ import org.junit.jupiter.api.Test;
  *
  * <p>The table states the hosts' Cepheid moduli for NGC 4258 at 29.387, with the errors of the Cepheids alone. Here they
  * are a published data vector of differences of two moduli, the anchor's distance is a rung of its own beneath, and the
- * intercept a_B = 0.71273 +- 0.00176 of the Hubble diagram (same paper, section 4) a datum that bears on no object.
+ * intercept a_B = 0.71273 +- 0.00176 of the Hubble diagram (same paper) a datum that bears on no object.
  *
  * <p>Check values: weighted mean of M_B = (m_B + 5 a_B) - 5 a_B - mu, computed with NumPy 1.24 from the table. The
  * printed sigma of M_B is rounded to 0.001 mag; with the printed one as weight the mean is -19.25181 +- 0.03182 and
@@ -79,7 +79,7 @@ class Hosts2016Test {
 
     private static final double REVISION = 0.010343100627214708;
 
-    /** The ladder of the table: weights of the supernovae so that the whole is a given column. */
+    /** The ladder of the table on an anchor, with given errors of the supernovae. */
     private record Hosts(Anchor anchor, Given cepheids, SecondaryIndicator supernovae, Own intercept) {
         static Hosts on(Anchor anchor, double[] supernovaSigmas) {
             Given cepheids = differences().calibratedBy(anchor);
@@ -129,7 +129,7 @@ class Hosts2016Test {
             return Ladder.of(supernovae, intercept).solve();
         }
 
-        /** log10 H0 = (M_B + 5 a_B + 25) / 5: Riess et al. 2016, equation 4. */
+        /** log10 H0 = (M_B + 5 a_B + 25) / 5: Riess et al. 2016, equation 4 (number from memory). */
         Derived hubbleConstant() {
             return Derived.of(
                     "Hubble constant",
