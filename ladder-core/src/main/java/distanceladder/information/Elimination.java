@@ -7,8 +7,9 @@ import java.util.Arrays;
  *
  * <p>For an object with k rows {@code a_i mu + x_i . theta = y_i + e_i} one reflection H turns the column a into
  * {@code (alpha, 0, ..., 0)}: the first row of {@code H [a | x | y]} is the object's <em>reading</em>, which still holds
- * mu; the other k - 1 rows hold none and go, with the rows of no object, into the <em>own triangle</em>. Since H is
- * orthogonal, reading and rows are independent and together say what the k rows said (Bierman 1977, chapter 4). With
+ * mu; the other k - 1 rows hold none and go, with the rows of no object, into the <em>own triangle</em>. First stands
+ * the row with the largest |a|: a precise row under a loose one would leave its rounding errors in it (row-wise
+ * stability: Cox and Higham 1998). Since H is orthogonal, reading and rows are independent and together say what the k rows said (Bierman 1977, chapter 4). With
  * one row nothing is left but the reading: a lone row says nothing of anything but its object.
  *
  * <p>Cost: 4 k p for an object, then the triangle of all left-over rows.
@@ -37,7 +38,7 @@ public final class Elimination {
         double[][] reading = new double[n][];
         for (int o = 0; o < n; o++) {
             a[o] = work.alpha(o);
-            reading[o] = work.turned[rows.start(o)];
+            reading[o] = work.turned[work.lead[o]];
         }
         Triangle own = work.reduce().triangle().withLengths(work.lengths);
         return new Elimination(rows, own, new Readings(rows.unknowns(), rows.objects(), a, reading));
@@ -88,11 +89,11 @@ public final class Elimination {
         int next = free;
         for (int o = 0; o < source.objectCount(); o++) {
             int from = source.start(o);
-            int k = source.start(o + 1) - from;
-            out[from] = alongReadings[o];
-            System.arraycopy(left, next, out, from + 1, k - 1);
-            next += k - 1;
-            if (k > 1) {
+            int to = source.start(o + 1);
+            for (int i = from; i < to; i++) {
+                out[i] = i == work.lead[o] ? alongReadings[o] : left[next++];
+            }
+            if (to - from > 1) {
                 work.reflect(o, out);
             }
         }
@@ -104,6 +105,7 @@ public final class Elimination {
         private final ObjectRows rows;
         private final double[][] turned;
         private final double[] lengths;
+        private final int[] lead;
 
         Work(ObjectRows rows) {
             this.rows = rows;
@@ -118,11 +120,23 @@ public final class Elimination {
             for (int j = 0; j < lengths.length; j++) {
                 lengths[j] = Math.sqrt(lengths[j]);
             }
-            for (int o = 0; o < rows.objectCount(); o++) {
+            this.lead = new int[rows.objectCount()];
+            for (int o = 0; o < lead.length; o++) {
+                lead[o] = largest(o);
                 if (rows.start(o + 1) - rows.start(o) > 1) {
                     turn(o);
                 }
             }
+        }
+
+        private int largest(int object) {
+            int at = rows.start(object);
+            for (int i = at + 1; i < rows.start(object + 1); i++) {
+                if (Math.abs(rows.coefficient(i)) > Math.abs(rows.coefficient(at))) {
+                    at = i;
+                }
+            }
+            return at;
         }
 
         private double norm(int object) {
@@ -134,21 +148,20 @@ public final class Elimination {
         }
 
         double alpha(int object) {
-            int from = rows.start(object);
-            double first = rows.coefficient(from);
-            if (rows.start(object + 1) - from == 1) {
+            double first = rows.coefficient(lead[object]);
+            if (rows.start(object + 1) - rows.start(object) == 1) {
                 return first;
             }
             return first > 0 ? -norm(object) : norm(object);
         }
 
         private double head(int object) {
-            return rows.coefficient(rows.start(object)) - alpha(object);
+            return rows.coefficient(lead[object]) - alpha(object);
         }
 
         private double beta(int object) {
             double s = norm(object);
-            return 1 / (s * (s + Math.abs(rows.coefficient(rows.start(object)))));
+            return 1 / (s * (s + Math.abs(rows.coefficient(lead[object]))));
         }
 
         private void turn(int object) {
@@ -156,13 +169,13 @@ public final class Elimination {
             int to = rows.start(object + 1);
             double head = head(object);
             double beta = beta(object);
-            double[] first = turned[from];
+            double[] first = turned[lead[object]];
             double[] w = new double[first.length];
             for (int k = 0; k < w.length; k++) {
                 w[k] = head * first[k];
             }
-            for (int i = from + 1; i < to; i++) {
-                double v = rows.coefficient(i);
+            for (int i = from; i < to; i++) {
+                double v = i == lead[object] ? 0 : rows.coefficient(i);
                 for (int k = 0; k < w.length; k++) {
                     w[k] += v * turned[i][k];
                 }
@@ -171,8 +184,8 @@ public final class Elimination {
                 w[k] *= beta;
                 first[k] -= head * w[k];
             }
-            for (int i = from + 1; i < to; i++) {
-                double v = rows.coefficient(i);
+            for (int i = from; i < to; i++) {
+                double v = i == lead[object] ? 0 : rows.coefficient(i);
                 for (int k = 0; k < w.length; k++) {
                     turned[i][k] -= v * w[k];
                 }
@@ -184,14 +197,14 @@ public final class Elimination {
             int from = rows.start(object);
             int to = rows.start(object + 1);
             double head = head(object);
-            double w = head * x[from];
-            for (int i = from + 1; i < to; i++) {
-                w += rows.coefficient(i) * x[i];
+            double w = head * x[lead[object]];
+            for (int i = from; i < to; i++) {
+                w += i == lead[object] ? 0 : rows.coefficient(i) * x[i];
             }
             w *= beta(object);
-            x[from] -= head * w;
-            for (int i = from + 1; i < to; i++) {
-                x[i] -= rows.coefficient(i) * w;
+            x[lead[object]] -= head * w;
+            for (int i = from; i < to; i++) {
+                x[i] -= i == lead[object] ? 0 : rows.coefficient(i) * w;
             }
         }
 
@@ -207,8 +220,10 @@ public final class Elimination {
                 left[next++] = turned[i];
             }
             for (int o = 0; o < rows.objectCount(); o++) {
-                for (int i = rows.start(o) + 1; i < rows.start(o + 1); i++) {
-                    left[next++] = turned[i];
+                for (int i = rows.start(o); i < rows.start(o + 1); i++) {
+                    if (i != lead[o]) {
+                        left[next++] = turned[i];
+                    }
                 }
             }
             return Reduction.ofRows(rows.unknowns(), left);
