@@ -19,12 +19,14 @@ import java.util.TreeSet;
  *
  * <p>Gauss-Newton iteration from a start that the data alone fix; nothing is taken over from another solution. A modulus
  * moves by at most {@link #LONGEST} in a step. It has converged when no modulus moves by more than {@link #CLOSE} of its
- * reading's own error and no parameter by more than that of its standard deviation.
+ * reading's own error and no parameter by more than that of its standard deviation; a move of {@link #ROUNDING} units in
+ * the last place is none, however small the error.
  */
 final class Solver {
     static final int MOST = 200;
     static final double CLOSE = 1e-10;
     static final double LONGEST = 2.5;
+    static final double ROUNDING = 16;
 
     private final Ladder ladder;
     private final TreeSet<String> set;
@@ -127,7 +129,8 @@ final class Solver {
                 Stated value = now.unknown(unknown);
                 parameters[j] = value.value();
                 double sigma = value.sigma();
-                note(unknown, sigma == 0 ? 0 : (parameters[j] - old.parameter(j)) / sigma);
+                double move = parameters[j] - old.parameter(j);
+                note(unknown, sigma == 0 || isRounding(move, value.value()) ? 0 : move / sigma);
             }
             double[] moduli = new double[old.size()];
             for (int i = 0; i < moduli.length; i++) {
@@ -143,8 +146,12 @@ final class Solver {
         private double moved(String object, double old) {
             double to = now.modulus(object);
             double move = Math.max(-LONGEST, Math.min(LONGEST, to - old));
-            note(Ladder.unknown(object), move / now.ownError(object));
+            note(Ladder.unknown(object), isRounding(move, to) ? 0 : move / now.ownError(object));
             return old + move;
+        }
+
+        private static boolean isRounding(double move, double value) {
+            return Math.abs(move) <= ROUNDING * Math.ulp(value);
         }
 
         private void note(String what, double move) {
