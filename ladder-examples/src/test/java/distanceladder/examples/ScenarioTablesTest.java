@@ -147,7 +147,7 @@ class ScenarioTablesTest {
             double velocity = flow.number(i, "velocity_km_s");
             assertTrue(velocity > 2500 && velocity < 25_500, flow.where(i, "velocity_km_s"));
             double z = velocity / Cosmography.LIGHT_KM_PER_S;
-            double distance = Cosmography.luminosityDistance(z, Scenario.HUBBLE, -0.55, 1);
+            double distance = Cosmography.luminosityDistance(z, Scenario.HUBBLE, Scenario.DECELERATION, Scenario.JERK);
             double variance = square(Scenario.PECULIAR) + square(flow.number(i, "velocity_error_km_s"));
             moduli.put(flow.cell(i, "galaxy"), new double[] {
                 Distances.modulusFromMegaparsec(distance), variance * square(MAGNITUDES_PER_SHARE / velocity)
@@ -185,7 +185,7 @@ class ScenarioTablesTest {
     void explosionsMeetTheFlow() {
         meetsTheFlow(
                 explosions,
-                0.10,
+                Scenario.EXPLOSION_SCATTER,
                 i -> Scenario.EXPLOSION
                         + Scenario.SHAPE * explosions.number(i, "shape")
                         + Scenario.COLOUR * explosions.number(i, "colour"));
@@ -195,7 +195,9 @@ class ScenarioTablesTest {
     void rotatorsMeetTheFlow() {
         meetsTheFlow(
                 rotators,
-                0.30,
-                i -> Scenario.ROTATOR + Scenario.WIDTH * rotators.number(i, "log_width") + Scenario.CAMERA);
+                Scenario.ROTATOR_SCATTER,
+                i -> Scenario.ROTATOR
+                        + Scenario.WIDTH * rotators.number(i, "log_width")
+                        + Scenario.CAMERA * rotators.number(i, "orbital"));
     }
 }
