@@ -20,11 +20,15 @@ import java.util.List;
 import java.util.Set;
 
 /**
- * A table of comma-separated text with a header line (RFC 4180; lines that begin with # are comments).
+ * A table of comma-separated text with a header line (RFC 4180), read strictly.
  *
- * <p>Read strictly: column names are distinct, every row has a cell for each column, and there is at least one row.
+ * <p>Lines that begin with # are comments and stand above the header; empty lines are skipped. Column names are
+ * distinct and not blank, every row has a cell for each column, there is at least one row, and quotes are closed: what
+ * does not fit is refused, and no row is left out silently. Cells are taken without surrounding blanks. Immutable.
  */
 public final class Table implements Shown {
+    private static final int SHOWN = 12;
+
     private final String label;
     private final List<String> columns;
     private final List<List<String>> rows;
@@ -40,8 +44,10 @@ public final class Table implements Shown {
     /**
      * Reads a file in UTF-8.
      *
-     * @param file the file
-     * @return its table
+     * @param file the file; a byte order mark is skipped
+     * @return its table, labelled with the file's name
+     * @throws NameFault when there is no such file, or a column's name is blank or stands twice
+     * @throws ValueFault when the file cannot be read or its text is no table
      */
     public static Table read(Path file) {
         String name = String.valueOf(file.getFileName());
@@ -64,33 +70,51 @@ public final class Table implements Shown {
      * @param label what the table is called in messages
      * @param text the text
      * @return its table
+     * @throws NameFault when a column's name is blank or stands twice
+     * @throws ValueFault when quotes are not closed, a row is too short or too long, a comment stands under the header,
+     *     or there are no rows
      */
     public static Table parse(String label, String text) {
         String clean = text.startsWith("\uFEFF") ? text.substring(1) : text;
+        Quotes.check(label, clean);
         List<List<String>> rows = new ArrayList<>();
         List<Long> lines = new ArrayList<>();
         try (CsvReader<CsvRecord> reader = CsvReader.builder()
-                .commentStrategy(CommentStrategy.SKIP)
+                .commentStrategy(CommentStrategy.READ)
+                .acceptCharsAfterQuotes(false)
                 .ignoreDifferentFieldCount(true)
                 .ofCsvRecord(clean)) {
             for (CsvRecord record : reader) {
-                rows.add(record.getFields().stream().map(String::strip).toList());
-                lines.add(record.getStartingLineNumber());
+                if (!record.isComment()) {
+                    rows.add(record.getFields().stream().map(String::strip).toList());
+                    lines.add(record.getStartingLineNumber());
+                } else if (!rows.isEmpty()) {
+                    throw lateComment(label, record);
+                }
             }
         } catch (CsvParseException | IOException broken) {
             throw new ValueFault(
                     "the text is not a table: " + broken.getMessage(),
-                    "a table is comma-separated text, quotes are closed",
+                    "a table is comma-separated text of moderate cells",
                     label,
-                    "check quotes and line ends");
+                    "check separators and line ends");
         }
         return checked(label, rows, lines);
+    }
+
+    /** Skipped, a row whose first name begins with # would be lost. */
+    private static ValueFault lateComment(String label, CsvRecord record) {
+        return new ValueFault(
+                "the line begins with #",
+                "comments stand above the header",
+                label + ", line " + record.getStartingLineNumber(),
+                "move the comment to the top; if it is a row, put its first cell in quotes");
     }
 
     private static Table checked(String label, List<List<String>> rows, List<Long> lines) {
         if (rows.size() < 2) {
             throw new ValueFault(
-                    Math.max(0, rows.size() - 1) + " rows",
+                    rows.isEmpty() ? "no header" : "0 rows",
                     "a table has a header line and at least one row",
                     label,
                     "add data");
@@ -152,9 +176,33 @@ public final class Table implements Shown {
      * @param row index from 0
      * @param column name of a column
      * @return its text without surrounding blanks
+     * @throws NameFault when there is no such column
+     * @throws ValueFault when there is no such row
      */
     public String cell(int row, String column) {
-        return rows.get(row).get(index(column));
+        return rows.get(within(row)).get(index(column));
+    }
+
+    /**
+     * The line on which a row begins.
+     *
+     * @param row index from 0
+     * @return its number in the text, from 1; comments, empty lines and the header count
+     * @throws ValueFault when there is no such row
+     */
+    public long line(int row) {
+        return lines.get(within(row));
+    }
+
+    private int within(int row) {
+        if (row < 0 || row >= size()) {
+            throw new ValueFault(
+                    "row " + row,
+                    "rows are counted from 0 to " + (size() - 1),
+                    label,
+                    "ask for a row that is in the table");
+        }
+        return row;
     }
 
     /**
@@ -163,6 +211,8 @@ public final class Table implements Shown {
      * @param row index from 0
      * @param column name of a column
      * @return a finite number
+     * @throws NameFault when there is no such column
+     * @throws ValueFault when there is no such row, or the cell is not a finite decimal number
      */
     public double number(int row, String column) {
         String cell = cell(row, column);
@@ -183,7 +233,12 @@ public final class Table implements Shown {
 
     /** Java reads "1d" and "0x1p3" as numbers; a table does not mean them so. */
     private static boolean plain(String cell) {
-        return cell.chars().allMatch(c -> "0123456789+-.eE".indexOf(c) >= 0);
+        for (int i = 0; i < cell.length(); i++) {
+            if ("0123456789+-.eE".indexOf(cell.charAt(i)) < 0) {
+                return false;
+            }
+        }
+        return true;
     }
 
     /**
@@ -192,9 +247,11 @@ public final class Table implements Shown {
      * @param row index from 0
      * @param column name of a column
      * @return file, line and column
+     * @throws NameFault when there is no such column
+     * @throws ValueFault when there is no such row
      */
     public String where(int row, String column) {
-        return label + ", line " + lines.get(row) + ", column " + (index(column) + 1) + " (" + column + ")";
+        return label + ", line " + line(row) + ", column " + (index(column) + 1) + " (" + column + ")";
     }
 
     private int index(String column) {
@@ -214,6 +271,7 @@ public final class Table implements Shown {
      *
      * @param datumColumn the column of the data's names
      * @return a reading to which columns are added
+     * @throws NameFault when there is no such column
      */
     public TableReading observations(String datumColumn) {
         return TableReading.of(this, datumColumn);
@@ -222,8 +280,12 @@ public final class Table implements Shown {
     @Override
     public String text() {
         Grid.Builder grid = Grid.with(columns.toArray(new String[0]));
-        rows.stream().limit(12).forEach(row -> grid.row(row.toArray()));
-        return grid.titled(label + ": " + size() + " rows").build().text();
+        rows.stream().limit(SHOWN).forEach(row -> grid.row(row.toArray()));
+        String rest = size() > SHOWN ? "\n... and " + (size() - SHOWN) + " more rows" : "";
+        return grid.titled(label + ": " + size() + (size() == 1 ? " row" : " rows"))
+                        .build()
+                        .text()
+                + rest;
     }
 
     @Override

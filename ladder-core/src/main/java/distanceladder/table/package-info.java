@@ -9,7 +9,7 @@
  * Observations stars = Table.read(Path.of("stars.csv"))
  *         .observations("star")
  *         .number("parallax", Unit.MILLIARCSECOND, "plx")
- *         .number("parallax error", Unit.MILLIARCSECOND, "plx_error")
+ *         .error("parallax error", Unit.MILLIARCSECOND, "plx_error")
  *         .build();
  * }</pre>
  *

@@ -33,9 +33,13 @@ public final class Scenario {
     static final double EXPLOSION = -19.24;
     static final double SHAPE = -0.14;
     static final double COLOUR = 3.05;
+    static final double EXPLOSION_SCATTER = 0.10;
     static final double ROTATOR = -21.35;
     static final double WIDTH = -8.8;
+    static final double ROTATOR_SCATTER = 0.30;
     static final double PECULIAR = 250;
+    static final double DECELERATION = -0.55;
+    static final double JERK = 1;
 
     private static final List<String> HOSTS =
             List.of("Ashmere", "Brindle", "Calder", "Dunlin", "Eskdale", "Fenwick", "Garrow", "Hollin");
@@ -129,9 +133,14 @@ public final class Scenario {
 
     private String anchors() {
         StringBuilder out = new StringBuilder(line("galaxy", "modulus", "statistical", "systematic"));
-        out.append(line("Anvil", modulus("Anvil") + 0.032 * normal("Anvil", 0), 0.025, 0.02));
-        out.append(line("Beacon", modulus("Beacon") + 0.05 * normal("Beacon", 0), 0.035, 0.03));
+        out.append(anchor("Anvil", 0.025, 0.02));
+        out.append(anchor("Beacon", 0.035, 0.03));
         return out.toString();
+    }
+
+    private String anchor(String galaxy, double statistical, double systematic) {
+        double sigma = Math.sqrt(statistical * statistical + systematic * systematic);
+        return line(galaxy, modulus(galaxy) + sigma * normal(galaxy, 0), statistical, systematic);
     }
 
     private double modulus(String galaxy) {
@@ -168,7 +177,9 @@ public final class Scenario {
             String galaxy = String.format(Locale.ROOT, "Fell %03d", i);
             double velocity = between(galaxy, 0, 3500, 24000);
             double z = velocity / Cosmography.LIGHT_KM_PER_S;
-            moduli.put(galaxy, Distances.modulusFromMegaparsec(Cosmography.luminosityDistance(z, HUBBLE, -0.55, 1)));
+            moduli.put(
+                    galaxy,
+                    Distances.modulusFromMegaparsec(Cosmography.luminosityDistance(z, HUBBLE, DECELERATION, JERK)));
             double error = between(galaxy, 1, 20, 60);
             long observed = StrictMath.round(velocity + PECULIAR * normal(galaxy, 2) + error * normal(galaxy, 3));
             out.append(line(galaxy, observed, StrictMath.round(error)));
@@ -194,7 +205,7 @@ public final class Scenario {
                     + EXPLOSION
                     + SHAPE * shape
                     + COLOUR * colour
-                    + 0.10 * normal(event, 3)
+                    + EXPLOSION_SCATTER * normal(event, 3)
                     + error * normal(event, 4);
             out.append(line(event, galaxies.get(i), magnitude, error, shape, colour));
         }
@@ -202,7 +213,7 @@ public final class Scenario {
     }
 
     private String rotators() {
-        StringBuilder out = new StringBuilder(line("galaxy", "magnitude", "magnitude_error", "log_width"));
+        StringBuilder out = new StringBuilder(line("galaxy", "magnitude", "magnitude_error", "log_width", "orbital"));
         List<String> galaxies = new ArrayList<>(HOSTS);
         for (int i = 41; i <= 120; i++) {
             galaxies.add(String.format(Locale.ROOT, "Fell %03d", i));
@@ -210,18 +221,19 @@ public final class Scenario {
         for (String galaxy : galaxies) {
             double width = 0.12 * normal("width of " + galaxy, 0);
             double error = between("width of " + galaxy, 1, 0.05, 0.1);
+            int orbital = HOSTS.contains(galaxy) ? 1 : 0;
             double magnitude = modulus(galaxy)
                     + ROTATOR
                     + WIDTH * width
-                    + CAMERA
-                    + 0.30 * normal("width of " + galaxy, 2)
+                    + CAMERA * orbital
+                    + ROTATOR_SCATTER * normal("width of " + galaxy, 2)
                     + error * normal("width of " + galaxy, 3);
-            out.append(line(galaxy, magnitude, error, width));
+            out.append(line(galaxy, magnitude, error, width, orbital));
         }
         return out.toString();
     }
 
-    private static String truth() {
+    private String truth() {
         StringBuilder out = new StringBuilder(line("quantity", "value"));
         out.append(line("Hubble constant [km/s/Mpc]", HUBBLE));
         out.append(line("pulsator zero point [mag]", ZERO_POINT));
@@ -233,9 +245,19 @@ public final class Scenario {
         out.append(line("explosions zero point [mag]", EXPLOSION));
         out.append(line("explosions shape coefficient [mag]", SHAPE));
         out.append(line("explosions colour coefficient [mag]", COLOUR));
+        out.append(line("explosions scatter [mag]", EXPLOSION_SCATTER));
         out.append(line("rotators zero point [mag]", ROTATOR));
         out.append(line("rotators width coefficient [mag/dex]", WIDTH));
+        out.append(line("rotators scatter [mag]", ROTATOR_SCATTER));
         out.append(line("peculiar velocities [km/s]", PECULIAR));
+        out.append(line("deceleration parameter", DECELERATION));
+        out.append(line("jerk parameter", JERK));
+        for (String galaxy : ANCHORS) {
+            out.append(line("modulus of " + galaxy + " [mag]", modulus(galaxy)));
+        }
+        for (String galaxy : HOSTS) {
+            out.append(line("modulus of " + galaxy + " [mag]", modulus(galaxy)));
+        }
         return out.toString();
     }
 }
