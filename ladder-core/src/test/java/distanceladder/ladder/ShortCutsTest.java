@@ -124,7 +124,7 @@ class ShortCutsTest {
     /** Objects that three rungs see: each rung's difference from the first whitened by itself. */
     @Test
     void differencesWhitenedRungByRung() {
-        Solution solution = diamond(independent(6, 0.1), independent(5, 0.02)).solve();
+        Solution solution = diamond(independent(6, 0.1), independent(5, 0.3)).solve();
         double right = right(solution);
         Settled settled = solution.settled();
         List<Triangle> pieces = new ArrayList<>();
