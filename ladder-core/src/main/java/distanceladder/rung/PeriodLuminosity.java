@@ -4,6 +4,7 @@ import distanceladder.astro.Unit;
 import distanceladder.relation.Definition;
 import distanceladder.relation.Dual;
 import distanceladder.relation.Equated;
+import distanceladder.relation.Equation;
 import distanceladder.relation.Noise;
 import distanceladder.relation.Observations;
 import distanceladder.relation.Rung;
@@ -31,12 +32,18 @@ public final class PeriodLuminosity implements Rung<PeriodLuminosity> {
     private static final String ZERO_POINT = "zero point";
     private static final String SLOPE = "slope";
     private static final String METALLICITY = "metallicity coefficient";
+    private static final String RATIO = "colour ratio";
+    private static final String BREAK = "break";
+    private static final String OVERTONE = "overtone offset";
 
     private final Definition definition;
     private final double pivot;
-    private final List<String> terms;
+    private final List<Term> terms;
 
-    private PeriodLuminosity(Definition definition, double pivot, List<String> terms) {
+    /** A term of the relation beyond zero point and slope: its parameter's role, its words, its columns with errors. */
+    private record Term(String role, String words, String uncertain, Equation shape) {}
+
+    private PeriodLuminosity(Definition definition, double pivot, List<Term> terms) {
         this.definition = definition;
         this.pivot = pivot;
         this.terms = terms;
@@ -79,22 +86,22 @@ public final class PeriodLuminosity implements Rung<PeriodLuminosity> {
 
     private PeriodLuminosity related() {
         double reference = pivot;
-        List<String> more = terms;
+        List<Term> more = terms;
         Equated relation = Equated.of((mu, at) -> {
             Dual m = mu.add(at.parameter(ZERO_POINT))
                     .add(at.parameter(SLOPE).multiply(at.column("log period") - reference));
-            for (String term : more) {
-                Dual factor = at.parameter(term);
-                m = m.add(term.equals(METALLICITY) ? factor.multiply(at.column("metallicity")) : factor);
+            for (Term term : more) {
+                m = m.add(term.shape.predict(at.parameter(term.role), at));
             }
             return m;
         });
+        for (Term term : terms) {
+            if (!term.uncertain.isEmpty()) {
+                relation = relation.withUncertain(term.uncertain);
+            }
+        }
         String words = "m = mu + M + b (log P - " + pivot + ")"
-                + String.join(
-                        "",
-                        terms.stream()
-                                .map(t -> t.equals(METALLICITY) ? " + g [O/H]" : " + " + t)
-                                .toList());
+                + String.join("", terms.stream().map(t -> " + " + t.words).toList());
         return new PeriodLuminosity(
                 definition
                         .withRelation(definition.data().has("offset") ? relation.withOffsets("offset") : relation)
@@ -103,12 +110,58 @@ public final class PeriodLuminosity implements Rung<PeriodLuminosity> {
                 terms);
     }
 
-    private PeriodLuminosity with(String term, Definition changed) {
-        List<String> more = new ArrayList<>(terms);
-        if (!more.contains(term)) {
-            more.add(term);
-        }
+    private PeriodLuminosity with(Term term, Definition changed) {
+        List<Term> more = new ArrayList<>(terms);
+        more.removeIf(t -> t.role.equals(term.role));
+        more.add(term);
         return new PeriodLuminosity(changed, pivot, List.copyOf(more)).related();
+    }
+
+    private static Term metals() {
+        return new Term(METALLICITY, "g [O/H]", "", (g, at) -> g.multiply(at.column("metallicity")));
+    }
+
+    /**
+     * The same relation for a magnitude in one band, made Wesenheit in the fit: {@code + R c}, with the colour c measured
+     * with an error. Magnitude and colour are taken to share no error.
+     *
+     * @param column column of the colour; its errors stand in "{@code column} error"
+     * @param ratio source of R, the ratio of extinction to reddening: exact, with an error, or free
+     * @return the rung
+     */
+    public PeriodLuminosity withColour(String column, Source ratio) {
+        definition.data().errors(column + " error", definition.data().unit(column));
+        Term term = new Term(RATIO, "R " + column, column, (r, at) -> r.multiply(at.uncertain(column)));
+        return with(term, definition.parameter(RATIO, ratio));
+    }
+
+    /**
+     * The same relation with a continuous break: another slope below a period, {@code + db min(log P - at, 0)}.
+     *
+     * @param logPeriod decimal logarithm of the period (days) of the break
+     * @param difference source of slope below less slope above, mag per dex
+     * @return the rung
+     */
+    public PeriodLuminosity withBreak(double logPeriod, Source difference) {
+        Term term = new Term(
+                BREAK,
+                "db min(log P - " + logPeriod + ", 0)",
+                "",
+                (b, at) -> b.multiply(Math.min(at.column("log period") - logPeriod, 0)));
+        return with(term, definition.parameter(BREAK, difference));
+    }
+
+    /**
+     * The same relation with overtone pulsators set off by a constant.
+     *
+     * @param column column that is 1 for an overtone pulsator and 0 for a fundamental one
+     * @param offset source of overtone less fundamental magnitude at equal period, mag
+     * @return the rung
+     */
+    public PeriodLuminosity withOvertones(String column, Source offset) {
+        definition.data().column(column);
+        Term term = new Term(OVERTONE, "o " + column, "", (o, at) -> o.multiply(at.column(column)));
+        return with(term, definition.parameter(OVERTONE, offset));
     }
 
     /**
@@ -149,7 +202,7 @@ public final class PeriodLuminosity implements Rung<PeriodLuminosity> {
      */
     public PeriodLuminosity withMetallicity(Source source) {
         definition.data().require("metallicity", Unit.DEX);
-        return with(METALLICITY, definition.parameter(METALLICITY, source));
+        return with(metals(), definition.parameter(METALLICITY, source));
     }
 
     /**
@@ -160,7 +213,7 @@ public final class PeriodLuminosity implements Rung<PeriodLuminosity> {
      */
     public PeriodLuminosity withMetallicity(SourceGroup.Member member) {
         definition.data().require("metallicity", Unit.DEX);
-        return with(METALLICITY, definition.parameter(METALLICITY, member));
+        return with(metals(), definition.parameter(METALLICITY, member));
     }
 
     /**
@@ -170,7 +223,8 @@ public final class PeriodLuminosity implements Rung<PeriodLuminosity> {
      * @return the rung
      */
     public PeriodLuminosity withCommonOffset(Source offset) {
-        return with(offset.name(), definition.parameter(offset.name(), offset));
+        return with(
+                new Term(offset.name(), offset.name(), "", (z, at) -> z), definition.parameter(offset.name(), offset));
     }
 
     /**
