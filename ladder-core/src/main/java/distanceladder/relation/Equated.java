@@ -85,11 +85,7 @@ public final class Equated implements Relation {
         return new Equated(equation, start, refusal, offsetColumn, uncertain.with(List.of(columns)));
     }
 
-    /**
-     * The columns that were measured with an error.
-     *
-     * @return their names
-     */
+    @Override
     public List<String> uncertain() {
         return uncertain.names();
     }
