@@ -154,11 +154,34 @@ public final class Sampled implements Shown {
          * @return true when both ends agree within half a unit of the last digit
          */
         public boolean agrees(double probability, int digits) {
-            double tolerance = tolerance(analytic.sigma(), digits);
+            return distance(probability) <= tolerance(analytic.sigma(), digits);
+        }
+
+        /** The larger of the distances between the ends of both intervals. */
+        private double distance(double probability) {
             Estimate.Interval first = analytic.interval(probability);
             Estimate.Interval drawn = interval(probability);
-            return Math.abs(first.lower() - drawn.lower()) <= tolerance
-                    && Math.abs(first.upper() - drawn.upper()) <= tolerance;
+            return Math.max(Math.abs(first.lower() - drawn.lower()), Math.abs(first.upper() - drawn.upper()));
+        }
+
+        /** To how many digits the analytic interval is good, in words, as far as the draws can tell. */
+        String verdict(double probability) {
+            // Standard error of a quantile of the normal distribution at 2.5 %: 2.67 sigma over the root of n.
+            double noise = 2 * 2.67 * sigma / Math.sqrt(sorted.length);
+            String good = "";
+            for (int digits = 1; digits <= 2; digits++) {
+                double tolerance = tolerance(analytic.sigma(), digits);
+                double off = distance(probability);
+                String word = digits == 1 ? "one digit" : "two digits";
+                if (off > tolerance + noise) {
+                    return good.isEmpty() ? "no digit" : good;
+                }
+                if (off > tolerance || noise > tolerance) {
+                    return (good.isEmpty() ? "" : good + "; ") + word + " with more draws?";
+                }
+                good = word;
+            }
+            return good;
         }
 
         /** Half a unit of the last of some significant digits (JCGM 101:2008, 7.9.2). */
@@ -217,7 +240,7 @@ public final class Sampled implements Shown {
                     ends(s.analytic.interval(0.95), s.sigma),
                     ends(s.interval(0.95), s.sigma),
                     ends(s.shortest(0.95), s.sigma),
-                    s.agrees(0.95, 2) ? "two digits" : s.agrees(0.95, 1) ? "one digit" : "no digit");
+                    s.verdict(0.95));
         }
         return grid.titled(count + " draws, seed " + seed + ", " + road.words()
                         + (refused == 0 ? "" : "; " + refused + " draws were refused and are not in the summaries"))

@@ -52,6 +52,9 @@ public final class Demo {
                 solution.correlation(skerry.flow.hubbleConstant(), skerry.offset),
                 solution.correlation(skerry.flow.hubbleConstant(), skerry.camera));
 
+        title("Can the error bar be believed? The whole ladder drawn by Monte Carlo");
+        show(solution.draw(1, 500, skerry.flow.hubbleConstant(), skerry.pulsators.zeroPoint(), skerry.offset));
+
         title("""
                 What if the parallax offset were -0.030 mas instead of -0.020 mas?
                 The offset is observed minus true: with -0.030 mas every true parallax is larger by 0.010 mas
