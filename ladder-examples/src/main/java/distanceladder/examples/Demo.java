@@ -5,8 +5,10 @@ import static distanceladder.relation.Amount.modulus;
 
 import distanceladder.ladder.Change;
 import distanceladder.ladder.Solution;
+import distanceladder.text.Fault;
 import java.io.PrintStream;
 import java.nio.charset.StandardCharsets;
+import java.nio.file.Path;
 
 /** The main job on the ladder of an invented observatory: built, solved, explained and revised. */
 public final class Demo {
@@ -19,10 +21,20 @@ public final class Demo {
     /**
      * Runs it.
      *
-     * @param args none
+     * @param args none for the demo; or a folder with a ladder of one's own
      */
     public static void main(String[] args) {
-        new Demo(new PrintStream(System.out, true, StandardCharsets.UTF_8)).run();
+        PrintStream out = new PrintStream(System.out, true, StandardCharsets.UTF_8);
+        if (args.length == 0) {
+            new Demo(out).run();
+            return;
+        }
+        try {
+            OwnLadder.run(Path.of(args[0]), out);
+        } catch (Fault fault) {
+            out.println(fault.getMessage());
+            System.exit(2);
+        }
     }
 
     private void run() {
