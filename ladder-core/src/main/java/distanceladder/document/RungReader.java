@@ -56,7 +56,22 @@ final class RungReader {
         return out;
     }
 
+    /** Builds the rung; what its kind refuses is told with the rung's place in the document. */
     Rung<?> build(List<Rung<?>> beneath) {
+        try {
+            return built(beneath);
+        } catch (ValueFault f) {
+            throw new ValueFault(f.what(), f.rule(), placed(f.where()), f.repair());
+        } catch (NameFault f) {
+            throw new NameFault(f.what(), f.rule(), placed(f.where()), f.repair());
+        }
+    }
+
+    private String placed(String where) {
+        return where.contains(", line ") ? where : where + " (rung \"" + name + "\", " + fields.where() + ")";
+    }
+
+    private Rung<?> built(List<Rung<?>> beneath) {
         String kind = fields.text("kind");
         Rung<?>[] under = beneath.toArray(new Rung<?>[0]);
         Rung<?> rung =

@@ -1,7 +1,11 @@
 package distanceladder.examples;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertThrows;
+import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import distanceladder.document.LadderFolder;
+import distanceladder.text.Fault;
 import java.io.IOException;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
@@ -47,5 +51,22 @@ class ReadmeTest {
     void ownRelation() throws IOException {
         assertEquals(region("own relation"), block("A relation of your own", "```java\n"));
         assertEquals(printed(FirstLadder.showOwn()), block("A relation of your own", "```text\n"));
+    }
+
+    @Test
+    void folderOfTables() throws IOException {
+        Path folder = Path.of("folders/first-ladder");
+        assertEquals(read(folder.resolve("ladder.json")).strip(), block("Your own tables", "```json\n"));
+        assertTrue(LadderFolder.read(folder).ladder().solve().text().contains("Hubble constant"));
+        Fault fault = assertThrows(Fault.class, () -> {
+            Path copy = Files.createTempDirectory("ladder");
+            for (String table : List.of("stars.csv", "hosts.csv", "events.csv", "flow.csv")) {
+                Files.copy(folder.resolve(table), copy.resolve(table));
+            }
+            String text = read(folder.resolve("ladder.json"));
+            Files.writeString(copy.resolve("ladder.json"), text.replace("[\"plx\"", "[\"plxx\""));
+            LadderFolder.read(copy);
+        });
+        assertEquals(fault.getMessage(), block("Your own tables", "```text\n"));
     }
 }
