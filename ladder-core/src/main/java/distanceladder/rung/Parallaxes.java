@@ -39,6 +39,7 @@ import java.util.Optional;
  */
 public final class Parallaxes implements Rung<Parallaxes> {
     private static final String OFFSET = "offset";
+    private static final double SMALLEST = 1e-3;
 
     private final Definition definition;
     private final List<String> columns;
@@ -73,7 +74,7 @@ public final class Parallaxes implements Rung<Parallaxes> {
                     }
                     return p;
                 })
-                .startingAt(d -> 10 - 5 * StrictMath.log10(Math.max(d.observed(), d.sigma())))
+                .startingAt(d -> 10 - 5 * StrictMath.log10(Math.max(Math.max(d.observed(), d.sigma()), SMALLEST)))
                 .refusing(d -> refusal(corrected(d, linear)));
         String words = "p = 10^((10 - mu)/5) + offset"
                 + String.join(

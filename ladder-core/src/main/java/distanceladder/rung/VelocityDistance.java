@@ -44,6 +44,7 @@ public final class VelocityDistance implements Rung<VelocityDistance> {
     private static final String J0 = "jerk parameter";
     private static final String FACTOR = "expansion factor";
     private static final double TYPICAL = 70;
+    private static final double SLOWEST = 10;
 
     private final Definition definition;
     private final Form form;
@@ -155,7 +156,8 @@ public final class VelocityDistance implements Rung<VelocityDistance> {
                     }
                     return v;
                 })
-                .startingAt(d -> 5 * StrictMath.log10(Math.max(d.observed(), d.sigma()) / TYPICAL) + 25)
+                .startingAt(d ->
+                        5 * StrictMath.log10(Math.max(Math.max(d.observed(), d.sigma()), SLOWEST) / TYPICAL) + 25)
                 .refusing(d -> refusal(d.observed()));
         return described(
                 Definition.of(definition.name(), full, "velocity", relation).withNoise(Noise.of(errors)),
