@@ -190,7 +190,8 @@ final class Settled {
         return refusalBy(white, withParameters(white, points(rung)), object);
     }
 
-    private Points points(String rung) {
+    /** Where a rung was linearised. */
+    Points points(String rung) {
         Decided found = decided.get(rung);
         if (found == null) {
             throw new IllegalArgumentException(rung + " is not part of this solution");

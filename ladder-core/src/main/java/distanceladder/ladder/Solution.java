@@ -149,6 +149,17 @@ public final class Solution implements Shown {
     }
 
     /**
+     * Where a rung's relation was linearised at last.
+     *
+     * @param rung name of a rung of the set
+     * @return its points, decided by this set
+     */
+    public distanceladder.relation.Points pointsOf(String rung) {
+        requireInSet(rung);
+        return settled.points(rung);
+    }
+
+    /**
      * The solution over all rungs of the ladder.
      *
      * @return the solution
