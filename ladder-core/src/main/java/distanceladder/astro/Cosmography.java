@@ -9,14 +9,14 @@ package distanceladder.astro;
  * with matter density 0.3 the error is below 2e-5 mag at z = 0.07 and 1.2e-4 mag at z = 0.15.
  */
 public final class Cosmography {
-    /** Speed of light in km/s, exact (SI). */
-    public static final double LIGHT_KM_PER_S = 299792.458;
+    /** Speed of light in km/s, that of {@link Constants}. */
+    public static final double LIGHT_KM_PER_S = Constants.C_KM_PER_S;
 
-    /** Kilometres in a megaparsec: pc = 648000/pi au (IAU 2015 B2), au = 149597870700 m (IAU 2012 B2). */
-    public static final double MPC_KM = 3.085677581491367e19;
+    /** Kilometres in a megaparsec, those of {@link Constants}. */
+    public static final double MPC_KM = Constants.MPC_KM;
 
     /** Seconds in 10^9 Julian years of 365.25 days. */
-    public static final double GYR_S = 3.15576e16;
+    public static final double GYR_S = 1e9 * Constants.JULIAN_YEAR_S;
 
     private Cosmography() {}
 

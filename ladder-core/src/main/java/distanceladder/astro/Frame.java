@@ -16,7 +16,13 @@ public enum Frame {
     /** Local Group, Yahil, Tammann and Sandage 1977: 308 km/s to l 105, b -7. */
     LOCAL_GROUP_1977(308, 105, -7),
     /** Galactic centre, de Vaucouleurs et al. 1991 (RC3): 232.3 km/s to l 87.8, b 1.7. */
-    GALACTIC(232.3, 87.8, 1.7);
+    GALACTIC(232.3, 87.8, 1.7),
+    /** Cosmic microwave background, five years of WMAP, Hinshaw et al. 2009: 369.0 km/s to l 263.99, b 48.26. */
+    BACKGROUND_2009(369.0, 263.99, 48.26),
+    /** Cosmic microwave background, COBE, Fixsen et al. 1996: 371 km/s to l 264.14, b 48.26. */
+    BACKGROUND_1996(371, 264.14, 48.26),
+    /** Local Group by the old rule 300 sin l cos b (de Vaucouleurs et al. 1991, RC3): 300 km/s to l 90, b 0. */
+    LOCAL_GROUP_RULE(300, 90, 0);
 
     private final double speed;
     private final double longitude;
@@ -29,6 +35,34 @@ public enum Frame {
     }
 
     /**
+     * The Sun's speed in this frame.
+     *
+     * @return km/s
+     */
+    public double speed() {
+        return speed;
+    }
+
+    /**
+     * Where the Sun moves to in this frame.
+     *
+     * @return galactic direction
+     */
+    public Sky.Galactic apex() {
+        return new Sky.Galactic(longitude, latitude);
+    }
+
+    /**
+     * The Sun's velocity in this frame towards a galactic direction.
+     *
+     * @param direction where one looks
+     * @return km/s
+     */
+    public double solarMotion(Sky.Galactic direction) {
+        return Sky.along(speed, apex(), direction);
+    }
+
+    /**
      * The Sun's velocity in this frame towards a direction.
      *
      * @param ra right ascension, degrees
@@ -36,9 +70,7 @@ public enum Frame {
      * @return km/s; added to a small heliocentric velocity it gives that in the frame
      */
     public double solarMotion(double ra, double dec) {
-        Sky.Galactic g = Sky.galactic(ra, dec);
-        double angle = Sky.separation(g.longitude(), g.latitude(), longitude, latitude);
-        return speed * StrictMath.cos(angle * StrictMath.PI / 180);
+        return solarMotion(Sky.galactic(ra, dec));
     }
 
     /**
@@ -50,9 +82,30 @@ public enum Frame {
      * @return z in the frame
      */
     public double redshift(double heliocentric, double ra, double dec) {
-        double beta = speed / Cosmography.LIGHT_KM_PER_S;
-        double along = solarMotion(ra, dec) / Cosmography.LIGHT_KM_PER_S;
-        double sun = Math.sqrt(1 - beta * beta) / (1 + along) - 1;
-        return (1 + heliocentric) / (1 + sun) - 1;
+        return Redshifts.without(heliocentric, solarRedshift(ra, dec));
+    }
+
+    /**
+     * A redshift seen from the Sun, of one in this frame.
+     *
+     * @param z redshift in the frame
+     * @param ra right ascension, degrees
+     * @param dec declination, degrees
+     * @return heliocentric z
+     */
+    public double heliocentric(double z, double ra, double dec) {
+        return Redshifts.composed(z, solarRedshift(ra, dec));
+    }
+
+    /**
+     * The redshift that the Sun's motion alone gives an object at rest in this frame.
+     *
+     * @param ra right ascension, degrees
+     * @param dec declination, degrees
+     * @return z, below zero for an object ahead
+     */
+    public double solarRedshift(double ra, double dec) {
+        double beta = speed / Constants.C_KM_PER_S;
+        return Math.sqrt(1 - beta * beta) / (1 + solarMotion(ra, dec) / Constants.C_KM_PER_S) - 1;
     }
 }

@@ -46,7 +46,21 @@ public final class Sky {
         double x = StrictMath.cos(POLE_DEC) * StrictMath.sin(d)
                 - StrictMath.sin(POLE_DEC) * StrictMath.cos(d) * StrictMath.cos(a);
         double l = (NODE - StrictMath.atan2(y, x)) / DEGREE;
-        return new Galactic(((l % 360) + 360) % 360, StrictMath.asin(sinB) / DEGREE);
+        double b = StrictMath.atan2(sinB, Math.sqrt(x * x + y * y));
+        return new Galactic(((l % 360) + 360) % 360, b / DEGREE);
+    }
+
+    /**
+     * The part of a velocity along a line of sight, {@code v cos t} with t the angle between the two.
+     *
+     * @param speed v, km/s
+     * @param apex where the velocity points
+     * @param direction where one looks
+     * @return km/s, positive when the velocity points towards the object
+     */
+    public static double along(double speed, Galactic apex, Galactic direction) {
+        double angle = separation(direction.longitude(), direction.latitude(), apex.longitude(), apex.latitude());
+        return speed * StrictMath.cos(angle * DEGREE);
     }
 
     /**

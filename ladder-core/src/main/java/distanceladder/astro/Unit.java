@@ -8,27 +8,27 @@ import java.util.List;
 
 /**
  * The units of the trade. Units of one dimension convert by a factor; all numbers inside the library are in the base
- * unit of their dimension.
+ * unit of their dimension. Small units are divided by a whole number, which rounds once: 17 µas are 0.017 mas to the bit.
  */
 public enum Unit {
     /** Angle of parallax, base. */
     MILLIARCSECOND("mas", "parallax", 1),
     /** A thousandth of a milliarcsecond. */
-    MICROARCSECOND("µas", "parallax", 1e-3),
+    MICROARCSECOND("µas", "parallax", 1000),
     /** Length, base. */
     MEGAPARSEC("Mpc", "length", 1),
     /** A thousandth of a megaparsec. */
-    KILOPARSEC("kpc", "length", 1e-3),
+    KILOPARSEC("kpc", "length", 1000),
     /** A millionth of a megaparsec. */
-    PARSEC("pc", "length", 1e-6),
+    PARSEC("pc", "length", 1e6),
     /** Magnitude, base. */
     MAGNITUDE("mag", "magnitude", 1),
     /** A thousandth of a magnitude. */
-    MILLIMAGNITUDE("mmag", "magnitude", 1e-3),
+    MILLIMAGNITUDE("mmag", "magnitude", 1000),
     /** Velocity, base. */
     KILOMETRE_PER_SECOND("km/s", "velocity", 1),
     /** A thousandth of a kilometre per second. */
-    METRE_PER_SECOND("m/s", "velocity", 1e-3),
+    METRE_PER_SECOND("m/s", "velocity", 1000),
     /** Redshift, a number. */
     REDSHIFT("z", "redshift", 1),
     /** Time, base. */
@@ -48,28 +48,33 @@ public enum Unit {
 
     private final String symbol;
     private final String dimension;
-    private final double factor;
+    private final double perBase;
 
-    Unit(String symbol, String dimension, double factor) {
+    Unit(String symbol, String dimension, double perBase) {
         this.symbol = symbol;
         this.dimension = dimension;
-        this.factor = factor;
+        this.perBase = perBase;
     }
 
     /**
      * The unit of a symbol.
      *
-     * @param symbol such as "mas"; "uas" and "1" are understood too
+     * @param symbol such as "mas"; "uas", the Greek letter in "\u03BCas" and "1" are understood too
      * @return the unit
      */
     public static Unit of(String symbol) {
-        String wanted = symbol.equals("uas") ? "µas" : symbol.equals("1") ? "" : symbol;
+        String wanted =
+                switch (symbol) {
+                    case "uas", "\u03BCas" -> MICROARCSECOND.symbol;
+                    case "1" -> NONE.symbol;
+                    default -> symbol;
+                };
         for (Unit unit : values()) {
             if (unit.symbol.equals(wanted)) {
                 return unit;
             }
         }
-        List<String> known = Arrays.stream(values()).map(Unit::symbol).toList();
+        List<String> known = Arrays.stream(values()).map(Unit::written).toList();
         throw new NameFault(
                 "unit \"" + symbol + "\"", "units are written by their symbols", "", Nearest.hint(symbol, known));
     }
@@ -96,20 +101,20 @@ public enum Unit {
      * A number of this unit in the base unit of its dimension.
      *
      * @param x a number
-     * @return x times the unit's factor
+     * @return x over the number of these units in a base unit
      */
     public double toBase(double x) {
-        return x * factor;
+        return x / perBase;
     }
 
     /**
      * A number of the base unit in this unit.
      *
      * @param x a number in the base unit
-     * @return x over the unit's factor
+     * @return x times the number of these units in a base unit
      */
     public double fromBase(double x) {
-        return x / factor;
+        return x * perBase;
     }
 
     /**
@@ -125,9 +130,10 @@ public enum Unit {
                     x + " " + symbol,
                     "a " + dimension + " does not convert to " + to.symbol + " (" + to.dimension + ")",
                     "",
-                    "give it in one of " + alike(to));
+                    "give it in one of " + alike(to) + (isVelocity(to) ? ", or convert it by Redshifts" : ""));
         }
-        return this == to ? x : to.fromBase(toBase(x));
+        double finer = to.perBase / perBase;
+        return finer >= 1 ? x * finer : x / (perBase / to.perBase);
     }
 
     private static String alike(Unit unit) {
@@ -135,7 +141,17 @@ public enum Unit {
                 ", ",
                 Arrays.stream(values())
                         .filter(u -> u.dimension.equals(unit.dimension))
-                        .map(u -> u.symbol.isEmpty() ? "1" : u.symbol)
+                        .map(Unit::written)
                         .toList());
+    }
+
+    private String written() {
+        return symbol.isEmpty() ? "1" : symbol;
+    }
+
+    /** Whether a redshift, or a velocity, is wanted where the other was given. */
+    private boolean isVelocity(Unit to) {
+        return (this == REDSHIFT && to.dimension.equals(METRE_PER_SECOND.dimension))
+                || (to == REDSHIFT && dimension.equals(METRE_PER_SECOND.dimension));
     }
 }

@@ -1,5 +1,5 @@
 /**
- * Pure formulas of astronomy with their units: distances, expansion, frames, directions.
+ * Pure formulas of astronomy with their units: constants, distances, redshifts, expansion, frames, directions.
  *
  * <p>Start from {@link distanceladder.astro.Unit}, {@link distanceladder.astro.Distances} and {@link
  * distanceladder.astro.Cosmography}. Units are in names ({@code megaparsecFromModulus}) or in {@link

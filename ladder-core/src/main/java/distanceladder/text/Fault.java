@@ -5,7 +5,8 @@ package distanceladder.text;
  *
  * <p>All refusals of this library are of its five kinds, none of them checked.
  */
-public class Fault extends RuntimeException {
+public sealed class Fault extends RuntimeException
+        permits ValueFault, NameFault, GraphFault, RankFault, ConvergenceFault {
     private static final long serialVersionUID = 1;
 
     /** What was wrong. */

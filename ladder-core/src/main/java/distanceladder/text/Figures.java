@@ -12,6 +12,7 @@ import java.math.RoundingMode;
  */
 public final class Figures {
     private static final int DIGITS = 2;
+    private static final int DOUBLE_DIGITS = 17;
     private static final int PLAIN_FROM = -5;
     private static final int PLAIN_TO = 7;
 
@@ -22,19 +23,21 @@ public final class Figures {
      *
      * @param value a number
      * @param sigma its standard deviation
-     * @return such as {@code 71.3 ± 1.4}; for a sigma of 0 the value alone
+     * @return such as {@code 71.3 ± 1.4} or {@code (7.131 ± 0.014)e-13}; for a sigma of 0 the value alone
      */
     public static String pair(double value, double sigma) {
         if (!Double.isFinite(value) || !Double.isFinite(sigma)) {
-            return word(value) + " ± " + word(sigma);
+            return significant(value, 6) + " ± " + significant(sigma, DIGITS);
         }
         if (sigma == 0) {
             return significant(value, 6);
         }
         int place = place(sigma);
-        int top = Math.max(magnitude(value), magnitude(sigma));
-        if (place < -12 || top > PLAIN_TO || (top < PLAIN_FROM)) {
-            int power = top;
+        int power = power(value, place);
+        if (power - place >= DOUBLE_DIGITS) {
+            return significant(value, DOUBLE_DIGITS) + " ± " + sigma(sigma);
+        }
+        if (power > PLAIN_TO || power < PLAIN_FROM) {
             return "(" + plain(value, place, power) + " ± " + plain(sigma, place, power) + ")e" + power;
         }
         return plain(value, place, 0) + " ± " + plain(sigma, place, 0);
@@ -48,10 +51,16 @@ public final class Figures {
      * @return the rounded value alone
      */
     public static String value(double value, double sigma) {
-        if (!Double.isFinite(value) || !(sigma > 0)) {
+        if (!Double.isFinite(value) || !(sigma > 0) || Double.isInfinite(sigma)) {
             return significant(value, 6);
         }
-        return plain(value, place(sigma), 0);
+        int place = place(sigma);
+        int power = power(value, place);
+        if (power - place >= DOUBLE_DIGITS) {
+            return significant(value, DOUBLE_DIGITS);
+        }
+        boolean plain = power <= PLAIN_TO && power >= PLAIN_FROM;
+        return plain ? plain(value, place, 0) : plain(value, place, power) + "e" + power;
     }
 
     /**
@@ -127,7 +136,7 @@ public final class Figures {
      * @return the move
      */
     public static String move(double move, double sigma) {
-        if (!Double.isFinite(move) || !(sigma > 0)) {
+        if (!Double.isFinite(move) || !(sigma > 0) || Double.isInfinite(sigma)) {
             return signed(move, 3);
         }
         int decimals = 1 - place(sigma);
@@ -162,7 +171,7 @@ public final class Figures {
     }
 
     private static String word(double x) {
-        return Double.isNaN(x) ? "not a number" : Double.isInfinite(x) ? (x > 0 ? "infinite" : "-infinite") : "" + x;
+        return Double.isNaN(x) ? "not a number" : x > 0 ? "infinite" : "-infinite";
     }
 
     /** Power of ten of the last digit that is shown. */
@@ -171,12 +180,11 @@ public final class Figures {
         return rounded.precision() - rounded.scale() - DIGITS;
     }
 
-    private static int magnitude(double x) {
-        if (x == 0) {
-            return 0;
-        }
-        BigDecimal exact = new BigDecimal(x);
-        return exact.precision() - exact.scale() - 1;
+    /** Power of ten of the first digit that is shown, of value or standard deviation. */
+    private static int power(double value, int place) {
+        BigDecimal rounded = new BigDecimal(value).setScale(-place, RoundingMode.HALF_EVEN);
+        int ofSigma = place + DIGITS - 1;
+        return rounded.signum() == 0 ? ofSigma : Math.max(ofSigma, rounded.precision() - rounded.scale() - 1);
     }
 
     private static String plain(double x, int place, int power) {

@@ -6,9 +6,13 @@ import java.util.regex.Pattern;
 
 /**
  * A table of text, its columns aligned: numbers on the decimal point, values with errors on the ± as well.
+ *
+ * <p>A column is one of numbers when at least half of the cells that are not empty are; other columns start at the left.
  */
 public final class Grid implements Shown {
     private static final Pattern NUMBER = Pattern.compile("[+-]?\\d+(\\.\\d*)?(e[+-]?\\d+)?( %)?");
+    private static final Pattern SCALED = Pattern.compile("\\([+-]?\\d+(\\.\\d*)?");
+    private static final Pattern BREAK = Pattern.compile("\\R");
     private static final String GAP = "  ";
 
     private final String title;
@@ -55,7 +59,7 @@ public final class Grid implements Shown {
         /**
          * Adds a row.
          *
-         * @param cells one for each column; a double is shown to six significant digits
+         * @param cells one for each column; a double is shown to six significant digits, a line break as a space
          * @return this builder
          */
         public Builder row(Object... cells) {
@@ -68,9 +72,10 @@ public final class Grid implements Shown {
             }
             List<String> row = new ArrayList<>();
             for (Object cell : cells) {
-                row.add(cell instanceof Double x ? Figures.significant(x, 6) : String.valueOf(cell));
+                String shown = cell instanceof Double x ? Figures.significant(x, 6) : String.valueOf(cell);
+                row.add(BREAK.matcher(shown).replaceAll(" "));
             }
-            rows.add(row);
+            rows.add(List.copyOf(row));
             return this;
         }
 
@@ -92,11 +97,11 @@ public final class Grid implements Shown {
         }
         StringBuilder text = new StringBuilder(title.isEmpty() ? "" : title + "\n");
         for (int line = -2; line < rows.size(); line++) {
-            StringBuilder out = new StringBuilder();
+            List<String> cells = new ArrayList<>();
             for (List<String> column : columns) {
-                out.append(out.length() == 0 ? "" : GAP).append(column.get(line + 2));
+                cells.add(column.get(line + 2));
             }
-            text.append(out.toString().stripTrailing());
+            text.append(String.join(GAP, cells).stripTrailing());
             text.append(line == rows.size() - 1 ? "" : "\n");
         }
         return text.toString();
@@ -106,7 +111,7 @@ public final class Grid implements Shown {
     private List<String> column(int index) {
         List<String> cells = new ArrayList<>();
         rows.forEach(row -> cells.add(row.get(index)));
-        boolean numeric = cells.stream().anyMatch(Grid::isNumber);
+        boolean numeric = isNumeric(cells);
         List<String> shaped = numeric ? aligned(cells) : cells;
         int width = Math.max(
                 length(headings.get(index)),
@@ -120,11 +125,16 @@ public final class Grid implements Shown {
         return out;
     }
 
+    private static boolean isNumeric(List<String> cells) {
+        long numbers = cells.stream().filter(Grid::isNumber).count();
+        long filled = cells.stream().filter(cell -> !cell.isEmpty()).count();
+        return numbers > 0 && 2 * numbers >= filled;
+    }
+
     private static boolean isNumber(String cell) {
-        int at = cell.indexOf(" ± ");
-        return at < 0
-                ? NUMBER.matcher(cell).matches()
-                : NUMBER.matcher(cell.substring(0, at)).matches();
+        String head = head(cell);
+        return NUMBER.matcher(head).matches()
+                || (head.length() < cell.length() && SCALED.matcher(head).matches());
     }
 
     /** Numbers padded so that points and ± stand under one another; other cells as they are. */

@@ -23,11 +23,20 @@ public final class Nearest {
         int limit = Math.max(2, wanted.length() / 2);
         return known.stream()
                 .distinct()
-                .filter(name -> distance(wanted, name) <= limit)
-                .sorted(Comparator.comparingInt((String name) -> distance(wanted, name))
-                        .thenComparing(Comparator.naturalOrder()))
+                .filter(name -> Math.abs(name.length() - wanted.length()) <= limit)
+                .map(name -> new Candidate(name, distance(wanted, name)))
+                .filter(candidate -> candidate.edits <= limit && candidate.sharesWith(wanted))
+                .sorted(Comparator.comparingInt(Candidate::edits).thenComparing(Candidate::name))
                 .limit(MOST)
+                .map(Candidate::name)
                 .toList();
+    }
+
+    private record Candidate(String name, int edits) {
+        /** Whether a character is left over when all edits are done: "H0" is not near "zp". */
+        boolean sharesWith(String wanted) {
+            return edits < Math.max(name.length(), wanted.length());
+        }
     }
 
     /**
@@ -54,7 +63,10 @@ public final class Nearest {
         return "\"" + String.join("\", \"", names) + "\"";
     }
 
-    /** Edits (insert, drop, replace, swap neighbours) between two names, upper and lower case alike (Damerau 1964). */
+    /**
+     * Edits (insert, drop, replace, swap neighbours) between two names, upper and lower case alike (Damerau 1964; no
+     * character is edited twice).
+     */
     static int distance(String a, String b) {
         String x = a.toLowerCase(Locale.ROOT);
         String y = b.toLowerCase(Locale.ROOT);

@@ -6,7 +6,8 @@ import java.util.List;
 public final class RankFault extends Fault {
     private static final long serialVersionUID = 1;
 
-    private final transient List<String> parameters;
+    /** The parameters of the null vector. */
+    private final String[] parameters;
 
     /**
      * A refusal.
@@ -19,7 +20,7 @@ public final class RankFault extends Fault {
      */
     public RankFault(String what, String rule, String where, String repair, List<String> parameters) {
         super(what, rule, where, repair);
-        this.parameters = List.copyOf(parameters);
+        this.parameters = parameters.toArray(String[]::new);
     }
 
     /**
@@ -28,6 +29,6 @@ public final class RankFault extends Fault {
      * @return their names
      */
     public List<String> parameters() {
-        return parameters;
+        return List.of(parameters);
     }
 }
