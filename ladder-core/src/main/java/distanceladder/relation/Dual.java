@@ -23,6 +23,11 @@ public final class Dual {
     boolean constant;
     boolean curved;
 
+    /** Partial derivatives outside [from, to) are zero and not stored: most numbers depend on few variables. */
+    int from;
+
+    int to;
+
     Dual(Tape tape, int variables) {
         this.tape = tape;
         this.partial = new double[variables];
@@ -44,7 +49,7 @@ public final class Dual {
      * @return d this / d variable
      */
     public double partial(int variable) {
-        return partial[variable];
+        return variable >= from && variable < to ? partial[variable] : 0;
     }
 
     /**
@@ -252,9 +257,29 @@ public final class Dual {
         out.value = w;
         out.constant = constant && v.constant;
         out.curved = curved || v.curved;
-        for (int i = 0; i < partial.length; i++) {
-            out.partial[i] = a * partial[i] + b * v.partial[i];
+        if (to == from) {
+            scaled(v, b, out);
+            return out;
         }
+        scaled(this, a, out);
+        double[] mine = out.partial;
+        double[] theirs = v.partial;
+        if (v.to == v.from) {
+            return out;
+        }
+        int low = Math.min(from, v.from);
+        int high = Math.max(to, v.to);
+        for (int i = low; i < from; i++) {
+            mine[i] = 0;
+        }
+        for (int i = to; i < high; i++) {
+            mine[i] = 0;
+        }
+        for (int i = v.from; i < v.to; i++) {
+            mine[i] += b * theirs[i];
+        }
+        out.from = low;
+        out.to = high;
         return out;
     }
 
@@ -263,10 +288,16 @@ public final class Dual {
         out.value = w;
         out.constant = constant;
         out.curved = curved || (bends && !constant);
-        for (int i = 0; i < partial.length; i++) {
-            out.partial[i] = slope * partial[i];
-        }
+        scaled(this, slope, out);
         return out;
+    }
+
+    private static void scaled(Dual v, double factor, Dual out) {
+        out.from = v.from;
+        out.to = v.to;
+        for (int i = v.from; i < v.to; i++) {
+            out.partial[i] = factor * v.partial[i];
+        }
     }
 
     @Override

@@ -16,6 +16,8 @@ import java.util.function.ToDoubleFunction;
  * private unknowns of the datum, linearised at their own joint estimate and eliminated ({@link #withUncertain}). A known offset of the datum from its object (geometry) is added to mu before.
  */
 public final class Equated implements Relation {
+    private static final double[] NO_SHIFT = new double[0];
+
     private final Equation equation;
     private final ToDoubleFunction<Datum> start;
     private final java.util.function.Function<Datum, Optional<String>> refusal;
@@ -174,10 +176,14 @@ public final class Equated implements Relation {
             Dual g = equation.predict(row.begin(i, bears, offsets[i]), row);
             a[i] = bears ? g.partial(0) : 0;
             rows[i] = row(g, at, unknowns.size(), observed[i] - g.value() + a[i] * at.modulus(i));
-            double[] slopes = slopes(g, unknowns.size());
-            rows[i][unknowns.size()] -= errors.shift(i, slopes, at);
-            extra[i] = errors.extra(i, slopes);
-            shifts[i] = errors.covarianceWithRow(i, slopes);
+            if (uncertain.size() == 0) {
+                shifts[i] = NO_SHIFT;
+            } else {
+                double[] slopes = slopes(g, unknowns.size());
+                rows[i][unknowns.size()] -= errors.shift(i, slopes, at);
+                extra[i] = errors.extra(i, slopes);
+                shifts[i] = errors.covarianceWithRow(i, slopes);
+            }
             requireFinite(definition, i, rows[i][unknowns.size()]);
             curved |= g.curved();
         }
@@ -227,13 +233,14 @@ public final class Equated implements Relation {
         private final Points at;
         private final Tape tape;
         private final List<String> uncertain;
-        private final java.util.Map<String, Integer> indices = new java.util.HashMap<>();
-        private final java.util.Map<String, double[]> columns = new java.util.HashMap<>();
+        private final Recall<Dual> parameters = new Recall<>(this::variable);
+        private final Recall<double[]> columns;
         private int datum;
 
         Row(Definition definition, Unknowns unknowns, Points at, List<String> uncertain) {
             this.uncertain = uncertain;
             this.definition = definition;
+            this.columns = new Recall<>(definition.data()::column);
             this.unknowns = unknowns;
             this.at = at;
             this.tape = new Tape(1 + unknowns.size() + uncertain.size());
@@ -242,22 +249,25 @@ public final class Equated implements Relation {
         Dual begin(int index, boolean bears, double offset) {
             datum = index;
             tape.rewind();
+            parameters.rewind();
+            columns.rewind();
             Dual modulus = bears ? tape.variable(0, at.modulus(index)) : tape.constant(0);
             return offset == 0 ? modulus : modulus.add(offset);
         }
 
         @Override
         public Dual parameter(String role) {
-            Integer index = indices.get(role);
-            if (index == null) {
-                String unknown = definition.parameters().get(role);
-                if (unknown == null) {
-                    throw unknownRole(definition, role);
-                }
-                index = unknowns.column(unknown);
-                indices.put(role, index);
+            return parameters.get(role);
+        }
+
+        /** Parameters have the same value for all data: one number for each serves all rows. */
+        private Dual variable(String role) {
+            String unknown = definition.parameters().get(role);
+            if (unknown == null) {
+                throw unknownRole(definition, role);
             }
-            return tape.variable(index + 1, at.parameter(index));
+            int index = unknowns.column(unknown);
+            return tape.lasting(index + 1, at.parameter(index));
         }
 
         @Override
@@ -275,7 +285,7 @@ public final class Equated implements Relation {
 
         @Override
         public double column(String column) {
-            return columns.computeIfAbsent(column, definition.data()::column)[datum];
+            return columns.get(column)[datum];
         }
     }
 

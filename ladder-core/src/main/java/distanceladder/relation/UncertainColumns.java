@@ -64,8 +64,8 @@ final class UncertainColumns {
         Errors(Definition definition) {
             Observations data = definition.data();
             int n = data.size();
-            covariance = new double[n][names.size()][names.size()];
-            withObservable = new double[n][names.size()];
+            covariance = new double[names.isEmpty() ? 0 : n][names.size()][names.size()];
+            withObservable = new double[names.isEmpty() ? 0 : n][names.size()];
             for (int k = 0; k < measured.length; k++) {
                 measured[k] = data.column(names.get(k));
                 double[] sigmas = data.errors(names.get(k) + " error", data.unit(names.get(k)));
