@@ -1,7 +1,9 @@
 package distanceladder.rung;
 
+import distanceladder.astro.Distances;
 import distanceladder.astro.Unit;
 import distanceladder.relation.Amount;
+import distanceladder.relation.Datum;
 import distanceladder.relation.Definition;
 import distanceladder.relation.Equated;
 import distanceladder.relation.Equation;
@@ -27,10 +29,12 @@ import java.util.Optional;
  * has no modulus when that parallax, less the offset, is not above zero. The errors are normal in the parallax; those
  * of moduli are first order and need a parallax of some significance, or a second datum.
  *
- * <p>Columns: {@code parallax}, {@code parallax error}.
+ * <p>Columns: {@code parallax}, {@code parallax error}; {@code offset} (modulus of the star less that of its object,
+ * mag) when present. The catalogue's zp is no column: it is the source given to {@link #withOffset(Source)}.
  */
 public final class Parallaxes implements Rung<Parallaxes> {
     private static final String OFFSET = "offset";
+    private static final String ERROR = "parallax error";
     private static final Equation EQUATION =
             (modulus, at) -> modulus.negate().add(10).divide(5).tenTo().add(at.parameter(OFFSET));
 
@@ -49,14 +53,22 @@ public final class Parallaxes implements Rung<Parallaxes> {
      */
     public static Parallaxes of(String name, Observations data) {
         data.require("parallax", Unit.MILLIARCSECOND);
-        double[] errors = data.errors("parallax error", Unit.MILLIARCSECOND);
+        double[] errors = data.errors(ERROR, Unit.MILLIARCSECOND);
+        boolean apart = Requirements.offsets(data);
         Equated relation = Equated.of(EQUATION)
-                .startingAt(d -> 10 - 5 * StrictMath.log10(Math.max(d.observed(), d.sigma())))
+                .startingAt(d -> start(d) - (apart ? d.column(Requirements.OFFSETS) : 0))
                 .refusing(d -> refusal(d.observed() - d.parameter(OFFSET)));
-        return new Parallaxes(Definition.of(name, data, "parallax", relation)
+        return new Parallaxes(Definition.of(
+                                name, data, "parallax", apart ? relation.withOffsets(Requirements.OFFSETS) : relation)
                         .described("p = 10^((10 - mu)/5) + offset, offset observed minus true")
                         .withNoise(Noise.of(errors)))
                 .withOffset(Source.exact(name + " offset", Amount.milliarcseconds(0)));
+    }
+
+    /** Noise of unknown size has no sigma yet; the column's error then keeps a negative parallax from infinity. */
+    private static double start(Datum d) {
+        double sigma = d.sigma() > 0 ? d.sigma() : d.column(ERROR);
+        return Distances.modulusFromParallax(Math.max(d.observed(), sigma));
     }
 
     private static Optional<String> refusal(double corrected) {
@@ -74,16 +86,18 @@ public final class Parallaxes implements Rung<Parallaxes> {
      * @return the rung
      */
     public Parallaxes withOffset(Source offset) {
+        Requirements.unit(name(), OFFSET, offset, Unit.MILLIARCSECOND);
         return new Parallaxes(definition.parameter(OFFSET, offset));
     }
 
     /**
      * The same rung with another offset.
      *
-     * @param offset a member of a group of sources
+     * @param offset observed minus true, in a unit of parallax, as a member of a group of sources
      * @return the rung
      */
     public Parallaxes withOffset(SourceGroup.Member offset) {
+        Requirements.unit(name(), OFFSET, offset, Unit.MILLIARCSECOND);
         return new Parallaxes(definition.parameter(OFFSET, offset));
     }
 

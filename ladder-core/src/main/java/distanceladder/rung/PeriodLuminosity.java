@@ -12,7 +12,10 @@ import distanceladder.relation.SourceGroup;
 import distanceladder.relation.Value;
 import distanceladder.text.ValueFault;
 import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.LinkedHashMap;
 import java.util.List;
+import java.util.Map;
 
 /**
  * A period-luminosity relation of pulsating stars.
@@ -22,7 +25,11 @@ import java.util.List;
  * with the apparent (Wesenheit) magnitude m, the modulus mu of the star or its galaxy, the absolute magnitude M of a star
  * at the pivot period, the slope b, the period P in days, and, when asked for, the metallicity x = [O/H] with its
  * coefficient g, and common offsets z_s of the photometry (Leavitt and Pickering 1912; Wesenheit magnitudes: Madore
- * 1982). Linear. Period and metallicity are taken as known exactly; a scatter is given by {@link Rung#withScatter}.
+ * 1982). Linear, so its first order is exact.
+ *
+ * <p>Period and metallicity are taken as known exactly: an error of a period is small against the scatter, that of a
+ * metallicity may not be. One slope holds for all periods and one mode of pulsation; where the relation breaks, or
+ * overtones are mixed in, take two rungs or a relation of your own. A scatter is given by {@link Rung#withScatter}.
  *
  * <p>Columns: {@code magnitude}, {@code magnitude error}; {@code log period} or {@code period}; {@code metallicity} when
  * asked for; {@code offset} (modulus of the star less that of its galaxy, mag) when present.
@@ -31,6 +38,7 @@ public final class PeriodLuminosity implements Rung<PeriodLuminosity> {
     private static final String ZERO_POINT = "zero point";
     private static final String SLOPE = "slope";
     private static final String METALLICITY = "metallicity coefficient";
+    private static final String COMMON = "common offset ";
 
     private final Definition definition;
     private final double pivot;
@@ -54,6 +62,7 @@ public final class PeriodLuminosity implements Rung<PeriodLuminosity> {
         double[] errors = data.errors("magnitude error", Unit.MAGNITUDE);
         Observations full = data.has("log period") ? data : withLogPeriod(data);
         full.require("log period", Unit.LOG_DAY);
+        Requirements.offsets(full);
         Definition definition = Definition.of(name, full, "magnitude", Equated.of((mu, at) -> mu))
                 .withNoise(Noise.of(errors))
                 .parameter(ZERO_POINT, Source.free(name + " zero point", Unit.MAGNITUDE))
@@ -77,6 +86,49 @@ public final class PeriodLuminosity implements Rung<PeriodLuminosity> {
         return data.with("log period", Unit.LOG_DAY, periods);
     }
 
+    /**
+     * The Wesenheit magnitude of three bands, {@code W = m_a - R (m_b - m_c)}, free of reddening when R is the ratio of
+     * total absorption in band a to the reddening of colour b - c (Madore 1982).
+     *
+     * <p>Its variance is that of independent errors in the bands: {@code e_a^2 + R^2 (e_b^2 + e_c^2)} for three different
+     * bands; a band that stands twice enters once, with its whole coefficient ({@code (1 - R)^2 e_a^2 + R^2 e_c^2} for b =
+     * a).
+     *
+     * @param data columns of the bands, and for each band b its errors as {@code b error}
+     * @param ratio R, finite
+     * @param bands the names of the columns a, b and c, in this order; b and c differ
+     * @return the table with columns {@code magnitude} and {@code magnitude error}
+     */
+    public static Observations wesenheit(Observations data, double ratio, String... bands) {
+        if (bands.length != 3 || bands[1].equals(bands[2]) || !Double.isFinite(ratio)) {
+            throw new ValueFault(
+                    "bands " + List.of(bands) + ", ratio = " + ratio,
+                    "a Wesenheit magnitude is a - R (b - c) of bands a, b and c, its colour of two different ones",
+                    data.label(),
+                    "name three bands and a finite ratio");
+        }
+        Map<String, Double> coefficients = new LinkedHashMap<>();
+        coefficients.put(bands[0], 1.0);
+        coefficients.merge(bands[1], -ratio, Double::sum);
+        coefficients.merge(bands[2], ratio, Double::sum);
+        double[] magnitudes = new double[data.size()];
+        double[] variances = new double[data.size()];
+        coefficients.forEach((band, factor) -> {
+            data.require(band, Unit.MAGNITUDE);
+            double[] numbers = data.column(band);
+            double[] errors = data.errors(band + " error", Unit.MAGNITUDE);
+            for (int i = 0; i < numbers.length; i++) {
+                magnitudes[i] += factor * numbers[i];
+                variances[i] += factor * factor * errors[i] * errors[i];
+            }
+        });
+        return data.with("magnitude", Unit.MAGNITUDE, magnitudes)
+                .with(
+                        "magnitude error",
+                        Unit.MAGNITUDE,
+                        Arrays.stream(variances).map(Math::sqrt).toArray());
+    }
+
     private PeriodLuminosity related() {
         double reference = pivot;
         List<String> more = terms;
@@ -93,11 +145,14 @@ public final class PeriodLuminosity implements Rung<PeriodLuminosity> {
                 + String.join(
                         "",
                         terms.stream()
-                                .map(t -> t.equals(METALLICITY) ? " + g [O/H]" : " + " + t)
+                                .map(t -> t.equals(METALLICITY) ? " + g [O/H]" : " + " + t.substring(COMMON.length()))
                                 .toList());
         return new PeriodLuminosity(
                 definition
-                        .withRelation(definition.data().has("offset") ? relation.withOffsets("offset") : relation)
+                        .withRelation(
+                                Requirements.offsets(definition.data())
+                                        ? relation.withOffsets(Requirements.OFFSETS)
+                                        : relation)
                         .described(words),
                 pivot,
                 terms);
@@ -114,10 +169,17 @@ public final class PeriodLuminosity implements Rung<PeriodLuminosity> {
     /**
      * The same relation with another pivot.
      *
-     * @param logPeriod decimal logarithm of the period (days) at which the zero point is stated
+     * @param logPeriod decimal logarithm of the period (days) at which the zero point is stated, finite
      * @return the rung
      */
     public PeriodLuminosity withPivot(double logPeriod) {
+        if (!Double.isFinite(logPeriod)) {
+            throw new ValueFault(
+                    "pivot = " + logPeriod + " log d",
+                    "a pivot is a finite number",
+                    "rung \"" + name() + "\"",
+                    "give the decimal logarithm of a period in days");
+        }
         return new PeriodLuminosity(definition, logPeriod, terms).related();
     }
 
@@ -128,7 +190,19 @@ public final class PeriodLuminosity implements Rung<PeriodLuminosity> {
      * @return the rung
      */
     public PeriodLuminosity withZeroPoint(Source source) {
+        Requirements.unit(name(), ZERO_POINT, source, Unit.MAGNITUDE);
         return like(definition.parameter(ZERO_POINT, source));
+    }
+
+    /**
+     * The same relation with another source of the zero point.
+     *
+     * @param member absolute magnitude at the pivot, mag, as a member of a group
+     * @return the rung
+     */
+    public PeriodLuminosity withZeroPoint(SourceGroup.Member member) {
+        Requirements.unit(name(), ZERO_POINT, member, Unit.MAGNITUDE);
+        return like(definition.parameter(ZERO_POINT, member));
     }
 
     /**
@@ -138,7 +212,19 @@ public final class PeriodLuminosity implements Rung<PeriodLuminosity> {
      * @return the rung
      */
     public PeriodLuminosity withSlope(Source source) {
+        Requirements.unit(name(), SLOPE, source, Unit.MAGNITUDE_PER_DEX, Unit.MAGNITUDE);
         return like(definition.parameter(SLOPE, source));
+    }
+
+    /**
+     * The same relation with another source of the slope.
+     *
+     * @param member slope, mag per dex, as a member of a group
+     * @return the rung
+     */
+    public PeriodLuminosity withSlope(SourceGroup.Member member) {
+        Requirements.unit(name(), SLOPE, member, Unit.MAGNITUDE_PER_DEX, Unit.MAGNITUDE);
+        return like(definition.parameter(SLOPE, member));
     }
 
     /**
@@ -148,7 +234,7 @@ public final class PeriodLuminosity implements Rung<PeriodLuminosity> {
      * @return the rung
      */
     public PeriodLuminosity withMetallicity(Source source) {
-        definition.data().require("metallicity", Unit.DEX);
+        requireMetallicity(source);
         return with(METALLICITY, definition.parameter(METALLICITY, source));
     }
 
@@ -159,8 +245,13 @@ public final class PeriodLuminosity implements Rung<PeriodLuminosity> {
      * @return the rung
      */
     public PeriodLuminosity withMetallicity(SourceGroup.Member member) {
-        definition.data().require("metallicity", Unit.DEX);
+        requireMetallicity(member);
         return with(METALLICITY, definition.parameter(METALLICITY, member));
+    }
+
+    private void requireMetallicity(Value coefficient) {
+        definition.data().require("metallicity", Unit.DEX);
+        Requirements.unit(name(), METALLICITY, coefficient, Unit.MAGNITUDE_PER_DEX, Unit.MAGNITUDE);
     }
 
     /**
@@ -170,7 +261,19 @@ public final class PeriodLuminosity implements Rung<PeriodLuminosity> {
      * @return the rung
      */
     public PeriodLuminosity withCommonOffset(Source offset) {
-        return with(offset.name(), definition.parameter(offset.name(), offset));
+        Requirements.unit(name(), "common offset", offset, Unit.MAGNITUDE);
+        return with(COMMON + offset.name(), definition.parameter(COMMON + offset.name(), offset));
+    }
+
+    /**
+     * The same relation with an offset that all its magnitudes have in common (observed minus true).
+     *
+     * @param offset the offset, mag, as a member of a group
+     * @return the rung
+     */
+    public PeriodLuminosity withCommonOffset(SourceGroup.Member offset) {
+        Requirements.unit(name(), "common offset", offset, Unit.MAGNITUDE);
+        return with(COMMON + offset.name(), definition.parameter(COMMON + offset.name(), offset));
     }
 
     /**

@@ -8,6 +8,7 @@ import distanceladder.relation.Noise;
 import distanceladder.relation.Observations;
 import distanceladder.relation.Rung;
 import distanceladder.relation.Source;
+import distanceladder.relation.SourceGroup;
 import distanceladder.relation.Value;
 import distanceladder.text.NameFault;
 import java.util.ArrayList;
@@ -20,8 +21,11 @@ import java.util.List;
  *
  * with the apparent magnitude m, the absolute magnitude M, covariates x_k (light-curve shape, colour, width, a step of
  * 0 or 1) with coefficients c_k (Tripp 1998, equation 2, for supernovae), and common offsets z_s of the photometry, such
- * as a zero point that another rung shares. Linear. Covariates are taken as known exactly; a scatter is given by {@link
- * Rung#withScatter}.
+ * as a zero point that another rung shares. Linear, so its first order is exact.
+ *
+ * <p>Covariates enter as they stand in the table, not centred: M is the magnitude at x_k = 0. They are taken as known
+ * exactly; errors that are not small against the spread of a covariate pull its coefficient towards 0, and belong in a
+ * relation of your own that reads them as uncertain. A scatter is given by {@link Rung#withScatter}.
  *
  * <p>Columns: {@code magnitude}, {@code magnitude error}, and one for each covariate; {@code offset} (modulus of the
  * datum less that of its object, mag) when present.
@@ -48,6 +52,7 @@ public final class SecondaryIndicator implements Rung<SecondaryIndicator> {
      */
     public static SecondaryIndicator of(String name, Observations data) {
         data.require("magnitude", Unit.MAGNITUDE);
+        Requirements.offsets(data);
         Definition definition = Definition.of(name, data, "magnitude", Equated.of((mu, at) -> mu))
                 .withNoise(Noise.of(data.errors("magnitude error", Unit.MAGNITUDE)))
                 .parameter(ZERO_POINT, Source.free(name + " zero point", Unit.MAGNITUDE));
@@ -63,7 +68,7 @@ public final class SecondaryIndicator implements Rung<SecondaryIndicator> {
                 m = m.add(at.parameter(role(x)).multiply(at.column(x)));
             }
             for (String z : shifts) {
-                m = m.add(at.parameter(z));
+                m = m.add(at.parameter(common(z)));
             }
             return m;
         });
@@ -73,7 +78,10 @@ public final class SecondaryIndicator implements Rung<SecondaryIndicator> {
                 + String.join("", offsets.stream().map(z -> " + " + z).toList());
         return new SecondaryIndicator(
                 definition
-                        .withRelation(definition.data().has("offset") ? relation.withOffsets("offset") : relation)
+                        .withRelation(
+                                Requirements.offsets(definition.data())
+                                        ? relation.withOffsets(Requirements.OFFSETS)
+                                        : relation)
                         .described(words),
                 covariates,
                 offsets);
@@ -81,6 +89,10 @@ public final class SecondaryIndicator implements Rung<SecondaryIndicator> {
 
     private static String role(String covariate) {
         return covariate + " coefficient";
+    }
+
+    private static String common(String offset) {
+        return "common offset " + offset;
     }
 
     /**
@@ -97,14 +109,27 @@ public final class SecondaryIndicator implements Rung<SecondaryIndicator> {
      * The same indicator standardised by a column.
      *
      * @param column name of the column
-     * @param coefficient source of its coefficient, mag for each unit of the column
+     * @param coefficient source of its coefficient, mag for each unit of the column's dimension
      * @return the rung
      */
     public SecondaryIndicator withCovariate(String column, Source coefficient) {
-        definition.data().column(column);
-        return new SecondaryIndicator(
-                        definition.parameter(role(column), coefficient), plus(covariates, column), offsets)
-                .related();
+        return standardised(column, definition.parameter(role(column), coefficient));
+    }
+
+    /**
+     * The same indicator standardised by a column.
+     *
+     * @param column name of the column
+     * @param coefficient its coefficient, mag for each unit of the column's dimension, as a member of a group
+     * @return the rung
+     */
+    public SecondaryIndicator withCovariate(String column, SourceGroup.Member coefficient) {
+        return standardised(column, definition.parameter(role(column), coefficient));
+    }
+
+    private SecondaryIndicator standardised(String column, Definition changed) {
+        changed.data().unit(column);
+        return new SecondaryIndicator(changed, plus(covariates, column), offsets).related();
     }
 
     /**
@@ -114,9 +139,22 @@ public final class SecondaryIndicator implements Rung<SecondaryIndicator> {
      * @return the rung
      */
     public SecondaryIndicator withCommonOffset(Source offset) {
-        return new SecondaryIndicator(
-                        definition.parameter(offset.name(), offset), covariates, plus(offsets, offset.name()))
-                .related();
+        return shifted(offset, definition.parameter(common(offset.name()), offset));
+    }
+
+    /**
+     * The same indicator with an offset that all its magnitudes have in common (observed minus true).
+     *
+     * @param offset the offset, mag, as a member of a group
+     * @return the rung
+     */
+    public SecondaryIndicator withCommonOffset(SourceGroup.Member offset) {
+        return shifted(offset, definition.parameter(common(offset.name()), offset));
+    }
+
+    private SecondaryIndicator shifted(Value offset, Definition changed) {
+        Requirements.unit(name(), "common offset", offset, Unit.MAGNITUDE);
+        return new SecondaryIndicator(changed, covariates, plus(offsets, offset.name())).related();
     }
 
     private static List<String> plus(List<String> list, String more) {
@@ -135,7 +173,19 @@ public final class SecondaryIndicator implements Rung<SecondaryIndicator> {
      * @return the rung
      */
     public SecondaryIndicator withZeroPoint(Source source) {
+        Requirements.unit(name(), ZERO_POINT, source, Unit.MAGNITUDE);
         return like(definition.parameter(ZERO_POINT, source));
+    }
+
+    /**
+     * The same indicator with another source of the zero point.
+     *
+     * @param member absolute magnitude, mag, as a member of a group
+     * @return the rung
+     */
+    public SecondaryIndicator withZeroPoint(SourceGroup.Member member) {
+        Requirements.unit(name(), ZERO_POINT, member, Unit.MAGNITUDE);
+        return like(definition.parameter(ZERO_POINT, member));
     }
 
     /**

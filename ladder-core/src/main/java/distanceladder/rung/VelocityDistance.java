@@ -1,8 +1,10 @@
 package distanceladder.rung;
 
 import distanceladder.astro.Cosmography;
+import distanceladder.astro.Distances;
 import distanceladder.astro.Unit;
 import distanceladder.relation.Amount;
+import distanceladder.relation.Datum;
 import distanceladder.relation.Definition;
 import distanceladder.relation.Derived;
 import distanceladder.relation.Equated;
@@ -10,6 +12,7 @@ import distanceladder.relation.Noise;
 import distanceladder.relation.Observations;
 import distanceladder.relation.Rung;
 import distanceladder.relation.Source;
+import distanceladder.relation.SourceGroup;
 import distanceladder.relation.Value;
 import distanceladder.text.Figures;
 import distanceladder.text.ValueFault;
@@ -30,10 +33,25 @@ import java.util.Optional;
  * it unless they approach us. Velocities are c z in the frame in which the expansion is at rest; a dispersion of peculiar
  * velocities is added to their errors by {@link #withPeculiarVelocity}.
  *
- * <p>Columns: {@code velocity}, {@code velocity error}; or {@code redshift}, {@code redshift error}.
+ * <p>The expansion is that of a flat universe to third order (Caldwell and Kamionkowski 2004; Visser 2004), as accurate
+ * as {@link Cosmography} says, at the observed redshift: a peculiar velocity u shifts f too, by a further (1 - q0) z / 2 of
+ * u, which is left out. Peculiar velocities are independent from galaxy to galaxy; where they are not, give {@link Noise}
+ * with a covariance. The forms agree while errors are small against velocities; where they are not, an error is normal
+ * in velocity and lopsided in modulus, and the velocity form is the right one.
+ *
+ * <p>The order in which options are set does not matter: each changes that option, and keeps the rest, the scatter and
+ * the noise that was put in place of the columns' errors. What cannot be kept, because its size is in the unit of the
+ * other form, is refused: {@link #inMagnitudes} comes before a scatter or noise in magnitudes.
+ *
+ * <p>Columns: {@code velocity}, {@code velocity error}; or {@code redshift}, {@code redshift error}; {@code offset}
+ * (modulus of the datum less that of its object, mag) when present.
  */
 public final class VelocityDistance implements Rung<VelocityDistance> {
     private static final String ETA = "log Hubble constant";
+    private static final String VELOCITY = "velocity";
+    private static final String ERROR = "velocity error";
+    private static final String FACTOR = "expansion factor";
+    private static final String MODULUS = "expansion modulus";
     private static final double TYPICAL = 70;
 
     private final Definition definition;
@@ -41,8 +59,58 @@ public final class VelocityDistance implements Rung<VelocityDistance> {
 
     /** How the rung is set up. */
     private record Form(double q0, double j0, boolean expansion, double peculiar, boolean magnitudes) {
-        double f(double velocity) {
-            return expansion ? Cosmography.f(velocity / Cosmography.LIGHT_KM_PER_S, q0, j0) : 1;
+        String observable() {
+            return magnitudes ? MODULUS : VELOCITY;
+        }
+
+        double[] factors(Observations data) {
+            double[] f = data.column(VELOCITY);
+            for (int i = 0; i < f.length; i++) {
+                f[i] = expansion ? Cosmography.f(f[i] / Cosmography.LIGHT_KM_PER_S, q0, j0) : 1;
+                if (!(f[i] > 0)) {
+                    throw fault(
+                            data,
+                            i,
+                            "the expansion to third order has come to f(z) = " + Figures.significant(f[i], 3)
+                                    + " there, and means nothing",
+                            "leave the datum out, or give distances computed by a cosmological model");
+                }
+            }
+            return f;
+        }
+
+        /** Standard deviations of the observable that the columns tell. */
+        double[] sigmas(Observations data) {
+            double[] v = data.column(VELOCITY);
+            double[] errors = data.column(ERROR);
+            for (int i = 0; i < v.length; i++) {
+                double sigma = Math.sqrt(errors[i] * errors[i] + peculiar * peculiar);
+                errors[i] = magnitudes ? Distances.modulusError(sigma / v[i]) : sigma;
+            }
+            return errors;
+        }
+
+        double[] moduli(Observations data, double[] f) {
+            double[] y = data.column(VELOCITY);
+            for (int i = 0; i < y.length; i++) {
+                if (!(y[i] > 0)) {
+                    throw fault(
+                            data,
+                            i,
+                            "the magnitude form takes the logarithm of the velocity",
+                            "use the velocity form, or leave the datum out");
+                }
+                y[i] = 5 * StrictMath.log10(y[i] * f[i]) + 25;
+            }
+            return y;
+        }
+
+        private static ValueFault fault(Observations data, int datum, String rule, String repair) {
+            return new ValueFault(
+                    "velocity = " + Figures.significant(data.column(VELOCITY)[datum], 6) + " km/s",
+                    rule,
+                    data.label() + ", datum \"" + data.names().get(datum) + "\"",
+                    repair);
         }
     }
 
@@ -59,13 +127,15 @@ public final class VelocityDistance implements Rung<VelocityDistance> {
      * @return the rung
      */
     public static VelocityDistance of(String name, Observations data) {
-        Observations full = data.has("velocity") ? data : withVelocity(data);
-        full.require("velocity", Unit.KILOMETRE_PER_SECOND);
-        full.errors("velocity error", Unit.KILOMETRE_PER_SECOND);
+        Observations full = data.has(VELOCITY) ? data : withVelocity(data);
+        full.require(VELOCITY, Unit.KILOMETRE_PER_SECOND);
+        double[] errors = full.errors(ERROR, Unit.KILOMETRE_PER_SECOND);
         Source eta = Source.free(name + " 5 log H0", Unit.MAGNITUDE).starting(5 * StrictMath.log10(TYPICAL));
-        Definition definition = Definition.of(name, full, "velocity", Equated.of((mu, at) -> mu))
+        Definition bare = Definition.of(name, full, VELOCITY, Equated.of((mu, at) -> mu))
+                .withNoise(Noise.of(errors))
                 .parameter(ETA, eta);
-        return new VelocityDistance(definition, new Form(-0.55, 1, true, 0, false)).related();
+        Form plain = new Form(-0.55, 1, true, 0, false);
+        return new VelocityDistance(bare, plain).with(plain);
     }
 
     private static Observations withVelocity(Observations data) {
@@ -76,73 +146,79 @@ public final class VelocityDistance implements Rung<VelocityDistance> {
             z[i] *= Cosmography.LIGHT_KM_PER_S;
             errors[i] *= Cosmography.LIGHT_KM_PER_S;
         }
-        return data.with("velocity", Unit.KILOMETRE_PER_SECOND, z)
-                .with("velocity error", Unit.KILOMETRE_PER_SECOND, errors);
+        return data.with(VELOCITY, Unit.KILOMETRE_PER_SECOND, z).with(ERROR, Unit.KILOMETRE_PER_SECOND, errors);
     }
 
-    /** The definition that belongs to the form; columns are computed from the velocities each time. */
-    private VelocityDistance related() {
+    /** The rung in another form; its columns are computed from the velocities each time. */
+    private VelocityDistance with(Form next) {
         Observations data = definition.data();
-        double[] v = data.column("velocity");
-        double[] errors = data.column("velocity error");
-        double[] f = new double[v.length];
-        for (int i = 0; i < v.length; i++) {
-            f[i] = form.f(v[i]);
-            errors[i] = Math.sqrt(errors[i] * errors[i] + form.peculiar * form.peculiar);
+        double[] f = next.factors(data);
+        Observations full = data.with(FACTOR, Unit.NONE, f);
+        if (next.magnitudes) {
+            full = full.with(MODULUS, Unit.MAGNITUDE, next.moduli(data, f));
         }
-        Observations full = data.with("expansion factor", Unit.NONE, f);
+        Definition fresh = Definition.of(name(), full, next.observable(), relation(next, Requirements.offsets(data)))
+                .restingOn(definition.restsOn())
+                .withCalibrators(definition.calibrators())
+                .withNoise(noise(next))
+                .described(next.magnitudes ? "5 log(c z f(z)) + 25 = mu + 5 log H0" : "c z f(z) = H0 d");
         return new VelocityDistance(
-                form.magnitudes ? inMagnitudes(full, v, errors, f) : inVelocity(full, errors), form);
+                logHubbleConstant() instanceof SourceGroup.Member member
+                        ? withEta(fresh.parameter(ETA, member))
+                        : withEta(fresh.parameter(ETA, (Source) logHubbleConstant())),
+                next);
     }
 
-    private Definition inVelocity(Observations full, double[] errors) {
-        Equated relation = Equated.of((mu, at) ->
-                        at.parameter(ETA).add(mu).subtract(25).divide(5).tenTo().divide(at.column("expansion factor")))
-                .startingAt(d -> 5 * StrictMath.log10(Math.max(d.observed(), d.sigma()) / TYPICAL) + 25)
-                .refusing(d -> refusal(d.observed()));
-        return described(
-                Definition.of(definition.name(), full, "velocity", relation).withNoise(Noise.of(errors)),
-                "c z f(z) = H0 d");
+    private static Equated relation(Form form, boolean apart) {
+        Equated relation = form.magnitudes
+                ? Equated.of((mu, at) -> mu.add(at.parameter(ETA)))
+                : Equated.of((mu, at) -> at.parameter(ETA)
+                                .add(mu)
+                                .subtract(25)
+                                .divide(5)
+                                .tenTo()
+                                .divide(at.column(FACTOR)))
+                        .startingAt(d -> start(d) - (apart ? d.column(Requirements.OFFSETS) : 0))
+                        .refusing(d -> refusal(d.observed()));
+        return apart ? relation.withOffsets(Requirements.OFFSETS) : relation;
     }
 
-    private Definition inMagnitudes(Observations full, double[] v, double[] errors, double[] f) {
-        double[] y = new double[v.length];
-        double[] sigmas = new double[v.length];
-        for (int i = 0; i < v.length; i++) {
-            if (!(v[i] > 0)) {
-                throw new ValueFault(
-                        "velocity = " + v[i] + " km/s",
-                        "the magnitude form takes the logarithm of the velocity",
-                        full.label() + ", datum \"" + full.names().get(i) + "\"",
-                        "use the velocity form, or leave the datum out");
-            }
-            y[i] = 5 * StrictMath.log10(v[i] * f[i]) + 25;
-            sigmas[i] = distanceladder.astro.Distances.modulusError(errors[i] / v[i]);
+    /** Noise of unknown size has no sigma yet; the column's error then keeps one that approaches from infinity. */
+    private static double start(Datum d) {
+        double sigma = d.sigma() > 0 ? d.sigma() : d.column(ERROR);
+        return 5 * StrictMath.log10(Math.max(d.observed(), sigma) / TYPICAL) + 25;
+    }
+
+    /** The columns' errors in another form; noise that the user gave is kept, or refused where it cannot be. */
+    private Noise noise(Form next) {
+        Noise now = definition.noise();
+        boolean columns = ColumnNoise.is(now, form.sigmas(definition.data()));
+        boolean rescaled = next.magnitudes != form.magnitudes;
+        boolean sized = ColumnNoise.hasMore(now) || !(columns || ColumnNoise.isNone(now));
+        if ((rescaled && sized) || (next.peculiar != form.peculiar && !columns)) {
+            throw new ValueFault(
+                    rescaled ? "noise or scatter in " + Unit.KILOMETRE_PER_SECOND.symbol() : "noise of its own",
+                    rescaled
+                            ? "the magnitude form has its noise in magnitudes"
+                            : "a peculiar velocity is added to the errors of the columns",
+                    "rung \"" + name() + "\"",
+                    rescaled
+                            ? "call inMagnitudes first, and give noise and scatter in mag"
+                            : "call withPeculiarVelocity first, or give noise that holds it");
         }
-        Observations with = full.with("expansion modulus", Unit.MAGNITUDE, y);
-        Equated relation = Equated.of((mu, at) -> mu.add(at.parameter(ETA)));
-        return described(
-                Definition.of(definition.name(), with, "expansion modulus", relation)
-                        .withNoise(Noise.of(sigmas)),
-                "5 log(c z f(z)) + 25 = mu + 5 log H0");
+        return columns ? ColumnNoise.replaced(now, next.sigmas(definition.data())) : now;
     }
 
-    private Definition described(Definition fresh, String words) {
-        Source eta = eta();
-        Derived hubble = Derived.of(
+    private static Definition withEta(Definition definition) {
+        return definition.highlighting(List.of(hubble(definition.value(ETA))));
+    }
+
+    private static Derived hubble(Value eta) {
+        return Derived.of(
                 "Hubble constant",
                 Unit.KILOMETRE_PER_SECOND_PER_MEGAPARSEC,
                 List.of(eta),
                 in -> in.get(0).divide(5).tenTo());
-        return fresh.restingOn(definition.restsOn())
-                .withCalibrators(definition.calibrators())
-                .parameter(ETA, eta)
-                .described(words)
-                .highlighting(List.of(hubble));
-    }
-
-    private Source eta() {
-        return (Source) definition.value(ETA);
     }
 
     private static Optional<String> refusal(double velocity) {
@@ -157,41 +233,47 @@ public final class VelocityDistance implements Rung<VelocityDistance> {
      *
      * @param q0 deceleration parameter
      * @param j0 jerk parameter
-     * @return the rung, its noise that of the columns
+     * @return the rung
      */
     public VelocityDistance withExpansion(double q0, double j0) {
-        return new VelocityDistance(definition, new Form(q0, j0, true, form.peculiar, form.magnitudes)).related();
+        return with(new Form(q0, j0, true, form.peculiar, form.magnitudes));
     }
 
     /**
      * The same relation with f = 1: velocity proportional to distance.
      *
-     * @return the rung, its noise that of the columns
+     * @return the rung
      */
     public VelocityDistance withoutExpansionTerms() {
-        return new VelocityDistance(definition, new Form(0, 0, false, form.peculiar, form.magnitudes)).related();
+        return with(new Form(0, 0, false, form.peculiar, form.magnitudes));
     }
 
     /**
-     * The same relation with a dispersion of peculiar velocities added to each error in quadrature.
+     * The same relation with a dispersion of peculiar velocities added to each column's error in quadrature.
      *
-     * @param dispersion standard deviation along the line of sight, a velocity
-     * @return the rung, its noise that of the columns
+     * @param dispersion standard deviation along the line of sight, a velocity of 0 or more; it replaces an earlier one
+     * @return the rung; refused when the columns' errors were replaced by other noise
      */
     public VelocityDistance withPeculiarVelocity(Amount dispersion) {
-        double sigma = dispersion.in(Unit.KILOMETRE_PER_SECOND).value();
-        return new VelocityDistance(definition, new Form(form.q0, form.j0, form.expansion, sigma, form.magnitudes))
-                .related();
+        double sigma = Unit.KILOMETRE_PER_SECOND.toBase(
+                dispersion.in(Unit.KILOMETRE_PER_SECOND).value());
+        if (!(sigma >= 0)) {
+            throw new ValueFault(
+                    "peculiar velocity = " + dispersion.text(),
+                    "a dispersion is 0 or more",
+                    "rung \"" + name() + "\"",
+                    "give its standard deviation");
+        }
+        return with(new Form(form.q0, form.j0, form.expansion, sigma, form.magnitudes));
     }
 
     /**
      * The same relation in magnitudes, linear; for a far flow.
      *
-     * @return the rung, its noise that of the columns
+     * @return the rung; refused when a velocity is not above zero, or when scatter or noise in km/s was given before
      */
     public VelocityDistance inMagnitudes() {
-        return new VelocityDistance(definition, new Form(form.q0, form.j0, form.expansion, form.peculiar, true))
-                .related();
+        return with(new Form(form.q0, form.j0, form.expansion, form.peculiar, true));
     }
 
     /**
@@ -201,7 +283,19 @@ public final class VelocityDistance implements Rung<VelocityDistance> {
      * @return the rung
      */
     public VelocityDistance withLogHubbleConstant(Source source) {
-        return new VelocityDistance(definition.parameter(ETA, source), form).related();
+        Requirements.unit(name(), ETA, source, Unit.MAGNITUDE);
+        return like(withEta(definition.parameter(ETA, source)));
+    }
+
+    /**
+     * The same relation with a member of a group as 5 log10 H0.
+     *
+     * @param member 5 log10 of the Hubble constant in km/s/Mpc, mag
+     * @return the rung
+     */
+    public VelocityDistance withLogHubbleConstant(SourceGroup.Member member) {
+        Requirements.unit(name(), ETA, member, Unit.MAGNITUDE);
+        return like(withEta(definition.parameter(ETA, member)));
     }
 
     /**
@@ -210,7 +304,7 @@ public final class VelocityDistance implements Rung<VelocityDistance> {
      * @return handle of H0 in km/s/Mpc
      */
     public Derived hubbleConstant() {
-        return (Derived) definition.highlights().get(0);
+        return hubble(logHubbleConstant());
     }
 
     /**
