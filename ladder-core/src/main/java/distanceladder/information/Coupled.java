@@ -137,7 +137,7 @@ public final class Coupled {
             double variance = source.covariance(i, i);
             for (int j = 0; j < sum.length; j++) {
                 double x = source.rows()[i][j];
-                sum[j] += x * x / variance;
+                sum[j] += variance == 0 ? 0 : x * x / variance;
             }
         }
         for (int j = 0; j < sum.length; j++) {

@@ -100,21 +100,62 @@ public final class Comparison implements Shown {
         }
     }
 
+    /** Whether the same data are only supposed different: same rungs, same data, no other meaning of a change. */
+    private boolean supposed() {
+        if (!before.rungs().equals(after.rungs())
+                || meanings.values().stream().anyMatch(m -> m != Change.Meaning.WHAT_IF)) {
+            return false;
+        }
+        return before.rungs().stream().allMatch(r -> names(before, r).equals(names(after, r)));
+    }
+
+    private static List<String> names(Solution solution, String rung) {
+        return solution.ladder().rung(rung).definition().data().names();
+    }
+
     @Override
     public String text() {
-        Grid.Builder grid = Grid.with("value", "before", "after", "unit", "move", "in sigma", "sigma of difference");
+        return supposed() ? movesAlone() : movesWithErrors();
+    }
+
+    private String movesAlone() {
+        Grid.Builder grid = Grid.with("value", "before", "after", "unit", "move", "in its sigma");
         for (Line line : lines()) {
-            String own = line.after.sigma() == 0 ? "" : Figures.fixed(line.move / line.after.sigma(), 2);
+            Object[] cells = cells(line);
+            grid.row(cells[0], cells[1], cells[2], cells[3], cells[4], cells[5]);
+        }
+        return grid.titled("What moved (a what-if: the same data supposed different, so moves are exact)")
+                .build()
+                .text();
+    }
+
+    private String movesWithErrors() {
+        Grid.Builder grid =
+                Grid.with("value", "before", "after", "unit", "move", "in its sigma", "sigma of difference", "in that");
+        for (Line line : lines()) {
+            Object[] cells = cells(line);
             grid.row(
-                    line.name,
-                    Figures.pair(line.before.value(), line.before.sigma()),
-                    Figures.pair(line.after.value(), line.after.sigma()),
-                    line.after.unit().symbol(),
-                    Figures.move(line.move, Math.max(line.before.sigma(), line.after.sigma())),
-                    own,
-                    line.exact() ? "exact" : Figures.sigma(line.sigma));
+                    cells[0],
+                    cells[1],
+                    cells[2],
+                    cells[3],
+                    cells[4],
+                    cells[5],
+                    line.exact() ? "exact" : Figures.sigma(line.sigma),
+                    line.exact() ? "" : Figures.fixed(line.move / line.sigma, 2));
         }
         return grid.titled("What moved").build().text();
+    }
+
+    private static Object[] cells(Line line) {
+        return new Object[] {
+            line.name,
+            Figures.pair(line.before.value(), line.before.sigma()),
+            Figures.pair(line.after.value(), line.after.sigma()),
+            line.after.unit().symbol(),
+            Figures.move(line.move, Math.max(line.before.sigma(), line.after.sigma())),
+            line.after.sigma() == 0 ? "" : Figures.fixed(line.move / line.after.sigma(), 2)
+        };
     }
 
     @Override

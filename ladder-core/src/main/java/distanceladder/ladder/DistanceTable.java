@@ -65,6 +65,22 @@ public final class DistanceTable implements Shown {
         return lines;
     }
 
+    private static String note(Line line) {
+        return line.refusal.orElse(line.sigma > FIRST_ORDER ? "first order does not hold over such an error" : "");
+    }
+
+    private static String modulus(Line line) {
+        return line.refusal.isPresent() ? "none" : Figures.pair(line.modulus, line.sigma);
+    }
+
+    private static String distance(Line line, Unit unit) {
+        if (line.refusal.isPresent()) {
+            return "none";
+        }
+        double d = unit.fromBase(Distances.megaparsecFromModulus(line.modulus));
+        return Figures.pair(d, d * line.sigma * StrictMath.log(10) / 5);
+    }
+
     /** All, or the first rows and those without a distance. */
     private List<Line> shown() {
         List<Line> some = new ArrayList<>();
@@ -82,21 +98,20 @@ public final class DistanceTable implements Shown {
     @Override
     public String text() {
         Unit unit = lines.stream().allMatch(l -> !(l.modulus >= NEAR)) ? Unit.KILOPARSEC : Unit.MEGAPARSEC;
-        Grid.Builder grid = Grid.with("object", "modulus [mag]", "distance [" + unit.symbol() + "]", "data in", "note");
         List<Line> some = shown();
+        boolean notes = some.stream().anyMatch(l -> !note(l).isEmpty());
+        List<String> headings =
+                new ArrayList<>(List.of("object", "modulus [mag]", "distance [" + unit.symbol() + "]", "data in"));
+        if (notes) {
+            headings.add("note");
+        }
+        Grid.Builder grid = Grid.with(headings.toArray(new String[0]));
         for (Line line : some) {
-            if (line.refusal.isPresent()) {
-                grid.row(line.object, "none", "none", line.by, line.refusal.get());
-            } else {
-                double d = unit.fromBase(Distances.megaparsecFromModulus(line.modulus));
-                String note = line.sigma > FIRST_ORDER ? "first order does not hold over such an error" : "";
-                grid.row(
-                        line.object,
-                        Figures.pair(line.modulus, line.sigma),
-                        Figures.pair(d, d * line.sigma * StrictMath.log(10) / 5),
-                        line.by,
-                        note);
+            List<Object> cells = new ArrayList<>(List.of(line.object, modulus(line), distance(line, unit), line.by));
+            if (notes) {
+                cells.add(note(line));
             }
+            grid.row(cells.toArray());
         }
         String rest = some.size() < lines.size() ? "\n... and " + (lines.size() - some.size()) + " more objects" : "";
         return grid.titled("Distances of " + rung + ": " + lines.size() + " objects")

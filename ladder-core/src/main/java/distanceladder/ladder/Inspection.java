@@ -122,13 +122,20 @@ final class Inspection {
         Set<String> own = new TreeSet<>(d.data().objects());
         own.addAll(d.relation().objects());
         own.remove("");
-        if (!d.restsOn().isEmpty() && !own.isEmpty() && own.stream().noneMatch(provided::contains)) {
+        boolean linked = own.stream().anyMatch(provided::contains) || sharesParameter(d, below);
+        if (!d.restsOn().isEmpty() && !own.isEmpty() && !linked) {
             String first = own.iterator().next();
             throw new GraphFault(
                     "none of the " + own.size() + " objects has a distance from beneath",
-                    "a rung that rests on others has a calibrator among their objects",
+                    "a rung that rests on others has an object or a parameter in common with them",
                     "rung \"" + name + "\"",
                     "check the objects' names: \"" + first + "\"; " + Nearest.hint(first, provided));
         }
+    }
+
+    /** Whether a free parameter is fixed further down too: a relation calibrated elsewhere, and applied here. */
+    private boolean sharesParameter(Definition d, Set<String> below) {
+        Map<String, Input> beneath = ladder.inputs(below);
+        return d.inputs().stream().anyMatch(i -> i.free() && beneath.containsKey(i.name()));
     }
 }

@@ -232,6 +232,54 @@ public final class Solution implements Shown {
     }
 
     /**
+     * Values propagated by Monte Carlo: by gains where the ladder is linear and no scatter is estimated, else solved anew
+     * in each draw.
+     *
+     * @param seed seed of the draws
+     * @param count number of draws, at least 100
+     * @param values handles
+     * @return the draws, summarised beside the analytic estimates
+     */
+    public Sampled draw(long seed, int count, Value... values) {
+        boolean straight = settled.assembly().rows().values().stream()
+                .allMatch(
+                        w -> !w.linear().curved() && settled.scatterVariances().isEmpty());
+        return draw(straight ? Road.GAINS : Road.RELINEARISED, seed, count, values);
+    }
+
+    /**
+     * Values propagated by Monte Carlo on a road that the user chooses.
+     *
+     * @param road how each draw is brought up the ladder
+     * @param seed seed of the draws
+     * @param count number of draws, at least 100
+     * @param values handles
+     * @return the draws, summarised beside the analytic estimates
+     */
+    public Sampled draw(Road road, long seed, int count, Value... values) {
+        if (count < 100) {
+            throw new distanceladder.text.ValueFault(
+                    count + " draws", "a sample has at least 100 draws", "", "ask for more");
+        }
+        Drawing drawing = new Drawing(this, seed, road, List.of(values));
+        double[][] draws = java.util.stream.IntStream.range(0, count)
+                .parallel()
+                .mapToObj(drawing::draw)
+                .toArray(double[][]::new);
+        List<Sampled.Summary> summaries = new ArrayList<>();
+        for (int v = 0; v < values.length; v++) {
+            int at = v;
+            summaries.add(new Sampled.Summary(
+                    of(values[v]),
+                    java.util.Arrays.stream(draws).mapToDouble(d -> d[at]).toArray()));
+        }
+        int refused = (int) java.util.Arrays.stream(draws)
+                .filter(d -> java.util.Arrays.stream(d).anyMatch(Double::isNaN))
+                .count();
+        return new Sampled(road, seed, summaries, count, refused);
+    }
+
+    /**
      * Chi-square of the whole and of each rung.
      *
      * @return the parts

@@ -12,23 +12,22 @@ import java.util.function.ToDoubleFunction;
  * A relation given by an {@link Equation}.
  *
  * <p>Linearised about {@code (mu0, theta0)}: {@code a = dg/dmu}, {@code b = dg/dtheta}, {@code y = observed - g(mu0,
- * theta0) + a mu0 + b . theta0}. A column x measured with an error is a private unknown of the datum, linearised at its own
- * joint estimate x0 and eliminated: with {@code s = dg/dx} the row's variance grows by {@code s^2 Var(x)} and y by
- * {@code -s (x - x0)}, so the slopes b are those at the estimate and not at the measured x. A known offset of the datum from its object (geometry) is added to mu before.
+ * theta0) + a mu0 + b . theta0}. Columns measured with an error are
+ * private unknowns of the datum, linearised at their own joint estimate and eliminated ({@link #withUncertain}). A known offset of the datum from its object (geometry) is added to mu before.
  */
 public final class Equated implements Relation {
     private final Equation equation;
     private final ToDoubleFunction<Datum> start;
     private final java.util.function.Function<Datum, Optional<String>> refusal;
     private final String offsetColumn;
-    private final List<String> uncertain;
+    private final UncertainColumns uncertain;
 
     private Equated(
             Equation equation,
             ToDoubleFunction<Datum> start,
             java.util.function.Function<Datum, Optional<String>> refusal,
             String offsetColumn,
-            List<String> uncertain) {
+            UncertainColumns uncertain) {
         this.uncertain = uncertain;
         this.equation = equation;
         this.start = start;
@@ -43,7 +42,7 @@ public final class Equated implements Relation {
      * @return the relation
      */
     public static Equated of(Equation equation) {
-        return new Equated(equation, datum -> 0, datum -> Optional.empty(), "", List.of());
+        return new Equated(equation, datum -> 0, datum -> Optional.empty(), "", UncertainColumns.NONE);
     }
 
     /**
@@ -83,16 +82,29 @@ public final class Equated implements Relation {
      * @return the relation
      */
     public Equated withUncertain(String... columns) {
-        return new Equated(equation, start, refusal, offsetColumn, List.of(columns));
+        return new Equated(equation, start, refusal, offsetColumn, uncertain.with(List.of(columns)));
+    }
+
+    @Override
+    public List<String> uncertain() {
+        return uncertain.names();
     }
 
     /**
-     * The columns that were measured with an error.
+     * The same relation with a covariance between the errors of an uncertain column and of another, or of the observable.
      *
-     * @return their names
+     * @param uncertainColumn an uncertain column
+     * @param other another, or the observable
+     * @param covarianceColumn a column of covariances, in the product of both base units
+     * @return the relation
      */
-    public List<String> uncertain() {
-        return uncertain;
+    public Equated withErrorCovariance(String uncertainColumn, String other, String covarianceColumn) {
+        return new Equated(
+                equation,
+                start,
+                refusal,
+                offsetColumn,
+                uncertain.withCovariance(uncertainColumn, other, covarianceColumn));
     }
 
     @Override
@@ -115,7 +127,7 @@ public final class Equated implements Relation {
         }
         double[][] covariates = new double[moduli.length][uncertain.size()];
         for (int k = 0; k < uncertain.size(); k++) {
-            double[] measured = definition.data().column(uncertain.get(k));
+            double[] measured = definition.data().column(uncertain.names().get(k));
             for (int i = 0; i < measured.length; i++) {
                 covariates[i][k] = measured[i];
             }
@@ -148,26 +160,24 @@ public final class Equated implements Relation {
         Observations data = definition.data();
         Unknowns unknowns = unknownsOf(definition);
         int n = data.size();
-        Errors errors = Errors.of(definition, uncertain);
+        UncertainColumns.Errors errors = uncertain.errors(definition);
         double[] observed = data.column(definition.observable());
         double[] offsets = offsetColumn.isEmpty() ? new double[n] : data.column(offsetColumn);
-        Row row = new Row(definition, unknowns, at, uncertain);
+        Row row = new Row(definition, unknowns, at, uncertain.names());
         double[] a = new double[n];
         double[][] rows = new double[n][];
         double[] extra = new double[n];
-        double[][] shifts = new double[n][uncertain.size()];
-        boolean curved = !uncertain.isEmpty();
+        double[][] shifts = new double[n][];
+        boolean curved = uncertain.size() > 0;
         for (int i = 0; i < n; i++) {
             boolean bears = !data.objects().get(i).isEmpty();
             Dual g = equation.predict(row.begin(i, bears, offsets[i]), row);
             a[i] = bears ? g.partial(0) : 0;
             rows[i] = row(g, at, unknowns.size(), observed[i] - g.value() + a[i] * at.modulus(i));
-            for (int k = 0; k < uncertain.size(); k++) {
-                double slope = g.partial(1 + unknowns.size() + k);
-                rows[i][unknowns.size()] -= slope * (errors.measured(i, k) - at.covariate(i, k));
-                extra[i] += slope * slope * errors.variance(i, k);
-                shifts[i][k] = -slope * errors.variance(i, k);
-            }
+            double[] slopes = slopes(g, unknowns.size());
+            rows[i][unknowns.size()] -= errors.shift(i, slopes, at);
+            extra[i] = errors.extra(i, slopes);
+            shifts[i] = errors.covarianceWithRow(i, slopes);
             requireFinite(definition, i, rows[i][unknowns.size()]);
             curved |= g.curved();
         }
@@ -184,28 +194,12 @@ public final class Equated implements Relation {
         return row;
     }
 
-    /** Measured numbers and variances of the uncertain columns. */
-    private record Errors(double[][] columns, double[][] sigmas) {
-        static Errors of(Definition definition, List<String> names) {
-            double[][] columns = new double[names.size()][];
-            double[][] sigmas = new double[names.size()][];
-            for (int k = 0; k < columns.length; k++) {
-                String name = names.get(k);
-                columns[k] = definition.data().column(name);
-                sigmas[k] = definition
-                        .data()
-                        .errors(name + " error", definition.data().unit(name));
-            }
-            return new Errors(columns, sigmas);
+    private double[] slopes(Dual g, int p) {
+        double[] slopes = new double[uncertain.size()];
+        for (int k = 0; k < slopes.length; k++) {
+            slopes[k] = g.partial(1 + p + k);
         }
-
-        double measured(int datum, int k) {
-            return columns[k][datum];
-        }
-
-        double variance(int datum, int k) {
-            return sigmas[k][datum] * sigmas[k][datum];
-        }
+        return slopes;
     }
 
     private static void requireFinite(Definition definition, int datum, double right) {

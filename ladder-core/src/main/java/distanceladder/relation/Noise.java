@@ -120,6 +120,17 @@ public final class Noise {
     }
 
     /**
+     * The same noise with another known covariance.
+     *
+     * @param other covariance in base units squared
+     * @return the noise
+     */
+    public Noise withCovariance(Covariance other) {
+        requireError();
+        return new Noise(other, scatter, mode, joint);
+    }
+
+    /**
      * The known covariance, without the scatter and without joint noise.
      *
      * @return covariance of the data

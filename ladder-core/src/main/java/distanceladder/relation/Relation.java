@@ -47,6 +47,15 @@ public sealed interface Relation permits Equated, Tabulated {
     }
 
     /**
+     * The columns that were measured with an error.
+     *
+     * @return their names; mostly none
+     */
+    default List<String> uncertain() {
+        return List.of();
+    }
+
+    /**
      * The relation of some of the data.
      *
      * @param rows indices of data

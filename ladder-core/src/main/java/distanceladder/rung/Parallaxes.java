@@ -1,12 +1,16 @@
 package distanceladder.rung;
 
+import distanceladder.astro.AngularKernel;
 import distanceladder.astro.Distances;
+import distanceladder.astro.Sky;
 import distanceladder.astro.Unit;
+import distanceladder.covariance.Dense;
+import distanceladder.covariance.Sum;
 import distanceladder.relation.Amount;
 import distanceladder.relation.Datum;
 import distanceladder.relation.Definition;
+import distanceladder.relation.Dual;
 import distanceladder.relation.Equated;
-import distanceladder.relation.Equation;
 import distanceladder.relation.Noise;
 import distanceladder.relation.Observations;
 import distanceladder.relation.Rung;
@@ -14,12 +18,15 @@ import distanceladder.relation.Source;
 import distanceladder.relation.SourceGroup;
 import distanceladder.relation.Value;
 import distanceladder.text.Figures;
+import distanceladder.text.ValueFault;
+import java.util.ArrayList;
+import java.util.List;
 import java.util.Optional;
 
 /**
  * Trigonometric parallaxes, kept as parallaxes.
  *
- * <pre>p = 10^((10 - mu) / 5) + zp      [mas]</pre>
+ * <pre>p = 10^((10 - mu) / 5) + zp + sum_k c_k x_k     [mas]</pre>
  *
  * with the modulus mu of the star (mag) and the offset zp of the catalogue, observed minus true: about -0.017 mas in raw
  * catalogues, which measure too small (common practice); to correct a parallax it is <em>subtracted</em>.
@@ -35,13 +42,13 @@ import java.util.Optional;
 public final class Parallaxes implements Rung<Parallaxes> {
     private static final String OFFSET = "offset";
     private static final String ERROR = "parallax error";
-    private static final Equation EQUATION =
-            (modulus, at) -> modulus.negate().add(10).divide(5).tenTo().add(at.parameter(OFFSET));
 
     private final Definition definition;
+    private final List<String> columns;
 
-    private Parallaxes(Definition definition) {
+    private Parallaxes(Definition definition, List<String> columns) {
         this.definition = definition;
+        this.columns = columns;
     }
 
     /**
@@ -54,21 +61,124 @@ public final class Parallaxes implements Rung<Parallaxes> {
     public static Parallaxes of(String name, Observations data) {
         data.require("parallax", Unit.MILLIARCSECOND);
         double[] errors = data.errors(ERROR, Unit.MILLIARCSECOND);
-        boolean apart = Requirements.offsets(data);
-        Equated relation = Equated.of(EQUATION)
+        Definition definition = Definition.of(name, data, "parallax", Equated.of((mu, at) -> mu))
+                .withNoise(Noise.of(errors))
+                .parameter(OFFSET, Source.exact(name + " offset", Amount.milliarcseconds(0)));
+        return new Parallaxes(definition, List.of()).related();
+    }
+
+    private Parallaxes related() {
+        List<String> linear = columns;
+        boolean apart = Requirements.offsets(definition.data());
+        Equated relation = Equated.of((modulus, at) -> {
+                    Dual p = modulus.negate().add(10).divide(5).tenTo().add(at.parameter(OFFSET));
+                    for (String x : linear) {
+                        p = p.add(at.parameter(term(x)).multiply(at.column(x)));
+                    }
+                    return p;
+                })
                 .startingAt(d -> start(d) - (apart ? d.column(Requirements.OFFSETS) : 0))
-                .refusing(d -> refusal(d.observed() - d.parameter(OFFSET)));
-        return new Parallaxes(Definition.of(
-                                name, data, "parallax", apart ? relation.withOffsets(Requirements.OFFSETS) : relation)
-                        .described("p = 10^((10 - mu)/5) + offset, offset observed minus true")
-                        .withNoise(Noise.of(errors)))
-                .withOffset(Source.exact(name + " offset", Amount.milliarcseconds(0)));
+                .refusing(d -> refusal(corrected(d, linear)));
+        String words = "p = 10^((10 - mu)/5) + offset"
+                + String.join(
+                        "", columns.stream().map(x -> " + k(" + x + ") " + x).toList())
+                + ", offset observed minus true";
+        Equated full = apart ? relation.withOffsets(Requirements.OFFSETS) : relation;
+        return new Parallaxes(definition.withRelation(full).described(words), columns);
     }
 
     /** Noise of unknown size has no sigma yet; the column's error then keeps a negative parallax from infinity. */
     private static double start(Datum d) {
         double sigma = d.sigma() > 0 ? d.sigma() : d.column(ERROR);
         return Distances.modulusFromParallax(Math.max(d.observed(), sigma));
+    }
+
+    private static String term(String column) {
+        return "offset by " + column;
+    }
+
+    private static double corrected(Datum d, List<String> linear) {
+        double p = d.observed() - d.parameter(OFFSET);
+        for (String x : linear) {
+            p -= d.parameter(term(x)) * d.column(x);
+        }
+        return p;
+    }
+
+    /**
+     * The same rung with an offset that is linear in a column (magnitude, colour, ecliptic latitude), beside the constant
+     * one.
+     *
+     * @param column name of the column
+     * @param coefficient source of the offset for each unit of the column, a unit of parallax
+     * @return the rung
+     */
+    public Parallaxes withOffsetTerm(String column, Source coefficient) {
+        return termed(column, coefficient, definition.parameter(term(column), coefficient));
+    }
+
+    /**
+     * The same rung with an offset that is linear in a column, beside the constant one.
+     *
+     * @param column name of the column
+     * @param coefficient the offset for each unit of the column, a unit of parallax, as a member of a group
+     * @return the rung
+     */
+    public Parallaxes withOffsetTerm(String column, SourceGroup.Member coefficient) {
+        return termed(column, coefficient, definition.parameter(term(column), coefficient));
+    }
+
+    private Parallaxes termed(String column, Value coefficient, Definition changed) {
+        changed.data().unit(column);
+        Requirements.unit(name(), term(column), coefficient, Unit.MILLIARCSECOND);
+        List<String> more = new ArrayList<>(columns);
+        if (!more.contains(column)) {
+            more.add(column);
+        }
+        return new Parallaxes(changed, List.copyOf(more)).related();
+    }
+
+    /**
+     * The same rung with all known errors larger by a factor.
+     *
+     * @param factor above zero
+     * @return the rung
+     */
+    public Parallaxes withErrorInflation(double factor) {
+        if (!(factor > 0) || Double.isInfinite(factor)) {
+            throw new ValueFault(
+                    "error inflation = " + factor, "the factor is above zero", definition.name(), "give one near 1");
+        }
+        Noise noise = definition.noise();
+        return like(definition.withNoise(noise.withCovariance(noise.covariance().scaled(factor * factor))));
+    }
+
+    /**
+     * The same rung with errors in common between stars near to one another on the sky, added to the others.
+     *
+     * <p>{@code C_ij = s^2 k(t_ij)} with the separation t from the columns {@code right ascension} and {@code declination}
+     * (degrees).
+     *
+     * @param sigma standard deviation s, a parallax
+     * @param scale angular scale of the correlation, degrees
+     * @param kernel how it falls off
+     * @return the rung
+     */
+    public Parallaxes withAngularErrors(Amount sigma, double scale, AngularKernel kernel) {
+        definition.data().require("right ascension", Unit.DEGREE);
+        definition.data().require("declination", Unit.DEGREE);
+        double[] ra = definition.data().column("right ascension");
+        double[] dec = definition.data().column("declination");
+        double s = sigma.in(Unit.MILLIARCSECOND).value();
+        double[][] c = new double[ra.length][ra.length];
+        for (int i = 0; i < ra.length; i++) {
+            for (int j = 0; j < ra.length; j++) {
+                double t = Sky.separation(ra[i], dec[i], ra[j], dec[j]);
+                c[i][j] = s * s * kernel.correlation(t, scale);
+            }
+        }
+        Noise noise = definition.noise();
+        return like(definition.withNoise(noise.withCovariance(Sum.of(noise.covariance(), Dense.fromCovariance(c)))));
     }
 
     private static Optional<String> refusal(double corrected) {
@@ -87,7 +197,7 @@ public final class Parallaxes implements Rung<Parallaxes> {
      */
     public Parallaxes withOffset(Source offset) {
         Requirements.unit(name(), OFFSET, offset, Unit.MILLIARCSECOND);
-        return new Parallaxes(definition.parameter(OFFSET, offset));
+        return like(definition.parameter(OFFSET, offset));
     }
 
     /**
@@ -98,7 +208,7 @@ public final class Parallaxes implements Rung<Parallaxes> {
      */
     public Parallaxes withOffset(SourceGroup.Member offset) {
         Requirements.unit(name(), OFFSET, offset, Unit.MILLIARCSECOND);
-        return new Parallaxes(definition.parameter(OFFSET, offset));
+        return like(definition.parameter(OFFSET, offset));
     }
 
     /**
@@ -117,7 +227,7 @@ public final class Parallaxes implements Rung<Parallaxes> {
 
     @Override
     public Parallaxes like(Definition other) {
-        return new Parallaxes(other);
+        return new Parallaxes(other, columns);
     }
 
     @Override

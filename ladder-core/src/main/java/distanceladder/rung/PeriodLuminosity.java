@@ -4,6 +4,7 @@ import distanceladder.astro.Unit;
 import distanceladder.relation.Definition;
 import distanceladder.relation.Dual;
 import distanceladder.relation.Equated;
+import distanceladder.relation.Equation;
 import distanceladder.relation.Noise;
 import distanceladder.relation.Observations;
 import distanceladder.relation.Rung;
@@ -25,11 +26,11 @@ import java.util.Map;
  * with the apparent (Wesenheit) magnitude m, the modulus mu of the star or its galaxy, the absolute magnitude M of a star
  * at the pivot period, the slope b, the period P in days, and, when asked for, the metallicity x = [O/H] with its
  * coefficient g, and common offsets z_s of the photometry (Leavitt and Pickering 1912; Wesenheit magnitudes: Madore
- * 1982). Linear, so its first order is exact.
+ * 1982). Linear, so its first order is exact, but for a colour that is measured with an error ({@link #withColour}).
  *
  * <p>Period and metallicity are taken as known exactly: an error of a period is small against the scatter, that of a
- * metallicity may not be. One slope holds for all periods and one mode of pulsation; where the relation breaks, or
- * overtones are mixed in, take two rungs or a relation of your own. A scatter is given by {@link Rung#withScatter}.
+ * metallicity may not be. One slope holds for all periods and one mode of pulsation, unless {@link #withBreak} and {@link
+ * #withOvertones} say otherwise. A scatter is given by {@link Rung#withScatter}.
  *
  * <p>Columns: {@code magnitude}, {@code magnitude error}; {@code log period} or {@code period}; {@code metallicity} when
  * asked for; {@code offset} (modulus of the star less that of its galaxy, mag) when present.
@@ -38,13 +39,19 @@ public final class PeriodLuminosity implements Rung<PeriodLuminosity> {
     private static final String ZERO_POINT = "zero point";
     private static final String SLOPE = "slope";
     private static final String METALLICITY = "metallicity coefficient";
+    private static final String RATIO = "colour ratio";
+    private static final String BREAK = "break";
+    private static final String OVERTONE = "overtone offset";
     private static final String COMMON = "common offset ";
 
     private final Definition definition;
     private final double pivot;
-    private final List<String> terms;
+    private final List<Term> terms;
 
-    private PeriodLuminosity(Definition definition, double pivot, List<String> terms) {
+    /** A term of the relation beyond zero point and slope: its parameter's role, its words, its columns with errors. */
+    private record Term(String role, String words, String uncertain, Equation shape) {}
+
+    private PeriodLuminosity(Definition definition, double pivot, List<Term> terms) {
         this.definition = definition;
         this.pivot = pivot;
         this.terms = terms;
@@ -131,22 +138,22 @@ public final class PeriodLuminosity implements Rung<PeriodLuminosity> {
 
     private PeriodLuminosity related() {
         double reference = pivot;
-        List<String> more = terms;
+        List<Term> more = terms;
         Equated relation = Equated.of((mu, at) -> {
             Dual m = mu.add(at.parameter(ZERO_POINT))
                     .add(at.parameter(SLOPE).multiply(at.column("log period") - reference));
-            for (String term : more) {
-                Dual factor = at.parameter(term);
-                m = m.add(term.equals(METALLICITY) ? factor.multiply(at.column("metallicity")) : factor);
+            for (Term term : more) {
+                m = m.add(term.shape.predict(at.parameter(term.role), at));
             }
             return m;
         });
+        for (Term term : terms) {
+            if (!term.uncertain.isEmpty()) {
+                relation = relation.withUncertain(term.uncertain);
+            }
+        }
         String words = "m = mu + M + b (log P - " + pivot + ")"
-                + String.join(
-                        "",
-                        terms.stream()
-                                .map(t -> t.equals(METALLICITY) ? " + g [O/H]" : " + " + t.substring(COMMON.length()))
-                                .toList());
+                + String.join("", terms.stream().map(t -> " + " + t.words).toList());
         return new PeriodLuminosity(
                 definition
                         .withRelation(
@@ -158,12 +165,91 @@ public final class PeriodLuminosity implements Rung<PeriodLuminosity> {
                 terms);
     }
 
-    private PeriodLuminosity with(String term, Definition changed) {
-        List<String> more = new ArrayList<>(terms);
-        if (!more.contains(term)) {
-            more.add(term);
-        }
+    private PeriodLuminosity with(Term term, Definition changed) {
+        List<Term> more = new ArrayList<>(terms);
+        more.removeIf(t -> t.role.equals(term.role));
+        more.add(term);
         return new PeriodLuminosity(changed, pivot, List.copyOf(more)).related();
+    }
+
+    private void requireFinite(String what, double logPeriod) {
+        if (!Double.isFinite(logPeriod)) {
+            throw new ValueFault(
+                    what + " = " + logPeriod + " log d",
+                    "a " + what + " is a finite number",
+                    "rung \"" + name() + "\"",
+                    "give the decimal logarithm of a period in days");
+        }
+    }
+
+    private static Term common(Value offset) {
+        return new Term(COMMON + offset.name(), offset.name(), "", (z, at) -> z);
+    }
+
+    private static Term metals() {
+        return new Term(METALLICITY, "g [O/H]", "", (g, at) -> g.multiply(at.column("metallicity")));
+    }
+
+    /**
+     * The same relation for a magnitude in one band, made Wesenheit in the fit: {@code + R c}, with the colour c measured
+     * with an error. Magnitude and colour are taken to share no error.
+     *
+     * @param column column of the colour; its errors stand in "{@code column} error"
+     * @param ratio source of R, the ratio of extinction to reddening: exact, with an error, or free
+     * @return the rung
+     */
+    public PeriodLuminosity withColour(String column, Source ratio) {
+        return with(colour(column, ratio), definition.parameter(RATIO, ratio));
+    }
+
+    /**
+     * The same relation made Wesenheit in the fit, with R as a member of a group.
+     *
+     * @param column column of the colour; its errors stand in "{@code column} error"
+     * @param ratio R, the ratio of extinction to reddening
+     * @return the rung
+     */
+    public PeriodLuminosity withColour(String column, SourceGroup.Member ratio) {
+        return with(colour(column, ratio), definition.parameter(RATIO, ratio));
+    }
+
+    private Term colour(String column, Value ratio) {
+        definition.data().errors(column + " error", Unit.MAGNITUDE);
+        definition.data().require(column, Unit.MAGNITUDE);
+        Requirements.unit(name(), RATIO, ratio, Unit.NONE, Unit.MAGNITUDE);
+        return new Term(RATIO, "R " + column, column, (r, at) -> r.multiply(at.uncertain(column)));
+    }
+
+    /**
+     * The same relation with a continuous break: another slope below a period, {@code + db min(log P - at, 0)}.
+     *
+     * @param logPeriod decimal logarithm of the period (days) of the break
+     * @param difference source of slope below less slope above, mag per dex
+     * @return the rung
+     */
+    public PeriodLuminosity withBreak(double logPeriod, Source difference) {
+        requireFinite("break", logPeriod);
+        Requirements.unit(name(), BREAK, difference, Unit.MAGNITUDE_PER_DEX, Unit.MAGNITUDE);
+        Term term = new Term(
+                BREAK,
+                "db min(log P - " + logPeriod + ", 0)",
+                "",
+                (b, at) -> b.multiply(Math.min(at.column("log period") - logPeriod, 0)));
+        return with(term, definition.parameter(BREAK, difference));
+    }
+
+    /**
+     * The same relation with overtone pulsators set off by a constant.
+     *
+     * @param column column that is 1 for an overtone pulsator and 0 for a fundamental one
+     * @param offset source of overtone less fundamental magnitude at equal period, mag
+     * @return the rung
+     */
+    public PeriodLuminosity withOvertones(String column, Source offset) {
+        definition.data().column(column);
+        Requirements.unit(name(), OVERTONE, offset, Unit.MAGNITUDE);
+        Term term = new Term(OVERTONE, "o " + column, "", (o, at) -> o.multiply(at.column(column)));
+        return with(term, definition.parameter(OVERTONE, offset));
     }
 
     /**
@@ -173,13 +259,7 @@ public final class PeriodLuminosity implements Rung<PeriodLuminosity> {
      * @return the rung
      */
     public PeriodLuminosity withPivot(double logPeriod) {
-        if (!Double.isFinite(logPeriod)) {
-            throw new ValueFault(
-                    "pivot = " + logPeriod + " log d",
-                    "a pivot is a finite number",
-                    "rung \"" + name() + "\"",
-                    "give the decimal logarithm of a period in days");
-        }
+        requireFinite("pivot", logPeriod);
         return new PeriodLuminosity(definition, logPeriod, terms).related();
     }
 
@@ -235,7 +315,7 @@ public final class PeriodLuminosity implements Rung<PeriodLuminosity> {
      */
     public PeriodLuminosity withMetallicity(Source source) {
         requireMetallicity(source);
-        return with(METALLICITY, definition.parameter(METALLICITY, source));
+        return with(metals(), definition.parameter(METALLICITY, source));
     }
 
     /**
@@ -246,7 +326,7 @@ public final class PeriodLuminosity implements Rung<PeriodLuminosity> {
      */
     public PeriodLuminosity withMetallicity(SourceGroup.Member member) {
         requireMetallicity(member);
-        return with(METALLICITY, definition.parameter(METALLICITY, member));
+        return with(metals(), definition.parameter(METALLICITY, member));
     }
 
     private void requireMetallicity(Value coefficient) {
@@ -262,7 +342,7 @@ public final class PeriodLuminosity implements Rung<PeriodLuminosity> {
      */
     public PeriodLuminosity withCommonOffset(Source offset) {
         Requirements.unit(name(), "common offset", offset, Unit.MAGNITUDE);
-        return with(COMMON + offset.name(), definition.parameter(COMMON + offset.name(), offset));
+        return with(common(offset), definition.parameter(COMMON + offset.name(), offset));
     }
 
     /**
@@ -273,7 +353,7 @@ public final class PeriodLuminosity implements Rung<PeriodLuminosity> {
      */
     public PeriodLuminosity withCommonOffset(SourceGroup.Member offset) {
         Requirements.unit(name(), "common offset", offset, Unit.MAGNITUDE);
-        return with(COMMON + offset.name(), definition.parameter(COMMON + offset.name(), offset));
+        return with(common(offset), definition.parameter(COMMON + offset.name(), offset));
     }
 
     /**

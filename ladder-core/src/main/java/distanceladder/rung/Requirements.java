@@ -17,14 +17,17 @@ final class Requirements {
     static void unit(String rung, String role, Value parameter, Unit... wanted) {
         String dimension = parameter.unit().dimension();
         if (Arrays.stream(wanted).noneMatch(u -> u.dimension().equals(dimension))) {
-            List<String> symbols = Arrays.stream(wanted).map(Unit::symbol).toList();
+            List<String> symbols = Arrays.stream(wanted).map(Requirements::word).toList();
             throw new ValueFault(
-                    role + " \"" + parameter.name() + "\" in "
-                            + parameter.unit().symbol(),
+                    role + " \"" + parameter.name() + "\" in " + word(parameter.unit()),
                     "the " + role + " is in " + String.join(" or ", symbols),
                     "rung \"" + rung + "\"",
                     "give a source in " + symbols.get(0));
         }
+    }
+
+    private static String word(Unit unit) {
+        return unit.symbol().isEmpty() ? "plain numbers" : unit.symbol();
     }
 
     /** The column of offsets from the object, when there is one: always magnitudes. */

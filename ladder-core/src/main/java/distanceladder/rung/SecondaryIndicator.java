@@ -21,11 +21,12 @@ import java.util.List;
  *
  * with the apparent magnitude m, the absolute magnitude M, covariates x_k (light-curve shape, colour, width, a step of
  * 0 or 1) with coefficients c_k (Tripp 1998, equation 2, for supernovae), and common offsets z_s of the photometry, such
- * as a zero point that another rung shares. Linear, so its first order is exact.
+ * as a zero point that another rung shares.
  *
- * <p>Covariates enter as they stand in the table, not centred: M is the magnitude at x_k = 0. They are taken as known
- * exactly; errors that are not small against the spread of a covariate pull its coefficient towards 0, and belong in a
- * relation of your own that reads them as uncertain. A scatter is given by {@link Rung#withScatter}.
+ * <p>Covariates are known exactly ({@code withCovariate}: the relation is then linear, and its first order exact) or
+ * measured with an error ({@code withUncertainCovariate}); an error that is not small against the spread of a covariate,
+ * taken for none, pulls its coefficient towards 0. They enter as they stand in the table, not centred: M is the magnitude
+ * at x_k = 0. A scatter is given by {@link Rung#withScatter}.
  *
  * <p>Columns: {@code magnitude}, {@code magnitude error}, and one for each covariate; {@code offset} (modulus of the
  * datum less that of its object, mag) when present.
@@ -34,13 +35,32 @@ public final class SecondaryIndicator implements Rung<SecondaryIndicator> {
     private static final String ZERO_POINT = "zero point";
 
     private final Definition definition;
-    private final List<String> covariates;
-    private final List<String> offsets;
+    private final Terms terms;
 
-    private SecondaryIndicator(Definition definition, List<String> covariates, List<String> offsets) {
+    /** What standardises the magnitude. */
+    private record Terms(
+            List<String> covariates, List<String> uncertain, List<List<String>> covariances, List<String> offsets) {
+        static final Terms NONE = new Terms(List.of(), List.of(), List.of(), List.of());
+
+        Terms exact(String column) {
+            List<List<String>> left = covariances.stream()
+                    .filter(c -> !c.subList(0, 2).contains(column))
+                    .toList();
+            return new Terms(plus(covariates, column), minus(uncertain, column), left, offsets);
+        }
+
+        Terms uncertain(String column) {
+            return new Terms(minus(covariates, column), plus(uncertain, column), covariances, offsets);
+        }
+
+        private static List<String> minus(List<String> list, String less) {
+            return list.stream().filter(x -> !x.equals(less)).toList();
+        }
+    }
+
+    private SecondaryIndicator(Definition definition, Terms terms) {
         this.definition = definition;
-        this.covariates = covariates;
-        this.offsets = offsets;
+        this.terms = terms;
     }
 
     /**
@@ -56,26 +76,34 @@ public final class SecondaryIndicator implements Rung<SecondaryIndicator> {
         Definition definition = Definition.of(name, data, "magnitude", Equated.of((mu, at) -> mu))
                 .withNoise(Noise.of(data.errors("magnitude error", Unit.MAGNITUDE)))
                 .parameter(ZERO_POINT, Source.free(name + " zero point", Unit.MAGNITUDE));
-        return new SecondaryIndicator(definition, List.of(), List.of()).related();
+        return new SecondaryIndicator(definition, Terms.NONE).related();
     }
 
     private SecondaryIndicator related() {
-        List<String> terms = covariates;
-        List<String> shifts = offsets;
+        Terms all = terms;
         Equated relation = Equated.of((mu, at) -> {
-            Dual m = mu.add(at.parameter(ZERO_POINT));
-            for (String x : terms) {
-                m = m.add(at.parameter(role(x)).multiply(at.column(x)));
-            }
-            for (String z : shifts) {
-                m = m.add(at.parameter(common(z)));
-            }
-            return m;
-        });
+                    Dual m = mu.add(at.parameter(ZERO_POINT));
+                    for (String x : all.covariates) {
+                        m = m.add(at.parameter(role(x)).multiply(at.column(x)));
+                    }
+                    for (String x : all.uncertain) {
+                        m = m.add(at.parameter(role(x)).multiply(at.uncertain(x)));
+                    }
+                    for (String z : all.offsets) {
+                        m = m.add(at.parameter(common(z)));
+                    }
+                    return m;
+                })
+                .withUncertain(all.uncertain.toArray(new String[0]));
+        for (List<String> pair : all.covariances) {
+            relation = relation.withErrorCovariance(pair.get(0), pair.get(1), pair.get(2));
+        }
+        List<String> covariates = new ArrayList<>(all.covariates);
+        covariates.addAll(all.uncertain);
         String words = "m = mu + M"
                 + String.join(
                         "", covariates.stream().map(x -> " + c(" + x + ") " + x).toList())
-                + String.join("", offsets.stream().map(z -> " + " + z).toList());
+                + String.join("", all.offsets.stream().map(z -> " + " + z).toList());
         return new SecondaryIndicator(
                 definition
                         .withRelation(
@@ -83,8 +111,7 @@ public final class SecondaryIndicator implements Rung<SecondaryIndicator> {
                                         ? relation.withOffsets(Requirements.OFFSETS)
                                         : relation)
                         .described(words),
-                covariates,
-                offsets);
+                terms);
     }
 
     private static String role(String covariate) {
@@ -129,7 +156,7 @@ public final class SecondaryIndicator implements Rung<SecondaryIndicator> {
 
     private SecondaryIndicator standardised(String column, Definition changed) {
         changed.data().unit(column);
-        return new SecondaryIndicator(changed, plus(covariates, column), offsets).related();
+        return new SecondaryIndicator(changed, terms.exact(column)).related();
     }
 
     /**
@@ -154,7 +181,63 @@ public final class SecondaryIndicator implements Rung<SecondaryIndicator> {
 
     private SecondaryIndicator shifted(Value offset, Definition changed) {
         Requirements.unit(name(), "common offset", offset, Unit.MAGNITUDE);
-        return new SecondaryIndicator(changed, covariates, plus(offsets, offset.name())).related();
+        Terms more =
+                new Terms(terms.covariates, terms.uncertain, terms.covariances, plus(terms.offsets, offset.name()));
+        return new SecondaryIndicator(changed, more).related();
+    }
+
+    /**
+     * The same indicator standardised by a column that was measured with an error, its coefficient free.
+     *
+     * <p>The true number of each datum is a private unknown, linearised at its joint estimate; errors in all variables.
+     *
+     * @param column name of the column; its errors stand in "{@code column} error"
+     * @return the rung
+     */
+    public SecondaryIndicator withUncertainCovariate(String column) {
+        return withUncertainCovariate(column, Source.free(definition.name() + " " + role(column), Unit.MAGNITUDE));
+    }
+
+    /**
+     * The same indicator standardised by a column that was measured with an error.
+     *
+     * @param column name of the column; its errors stand in "{@code column} error"
+     * @param coefficient source of its coefficient, mag for each unit of the column
+     * @return the rung
+     */
+    public SecondaryIndicator withUncertainCovariate(String column, Source coefficient) {
+        return measured(column, definition.parameter(role(column), coefficient));
+    }
+
+    /**
+     * The same indicator standardised by a column that was measured with an error.
+     *
+     * @param column name of the column; its errors stand in "{@code column} error"
+     * @param coefficient its coefficient, mag for each unit of the column's dimension, as a member of a group
+     * @return the rung
+     */
+    public SecondaryIndicator withUncertainCovariate(String column, SourceGroup.Member coefficient) {
+        return measured(column, definition.parameter(role(column), coefficient));
+    }
+
+    private SecondaryIndicator measured(String column, Definition changed) {
+        changed.data().errors(column + " error", changed.data().unit(column));
+        return new SecondaryIndicator(changed, terms.uncertain(column)).related();
+    }
+
+    /**
+     * The same indicator with a covariance between the errors of an uncertain covariate and another, or the magnitude.
+     *
+     * @param covariate an uncertain covariate
+     * @param other another, or "magnitude"
+     * @param column a column of covariances in the product of both units
+     * @return the rung
+     */
+    public SecondaryIndicator withErrorCovariance(String covariate, String other, String column) {
+        List<List<String>> pairs = new ArrayList<>(terms.covariances);
+        pairs.add(List.of(covariate, other, column));
+        Terms more = new Terms(terms.covariates, terms.uncertain, List.copyOf(pairs), terms.offsets);
+        return new SecondaryIndicator(definition, more).related();
     }
 
     private static List<String> plus(List<String> list, String more) {
@@ -215,7 +298,7 @@ public final class SecondaryIndicator implements Rung<SecondaryIndicator> {
 
     @Override
     public SecondaryIndicator like(Definition other) {
-        return new SecondaryIndicator(other, covariates, offsets);
+        return new SecondaryIndicator(other, terms);
     }
 
     @Override

@@ -1,7 +1,7 @@
 package distanceladder.rung;
 
 import distanceladder.astro.Cosmography;
-import distanceladder.astro.Distances;
+import distanceladder.astro.Frame;
 import distanceladder.astro.Unit;
 import distanceladder.relation.Amount;
 import distanceladder.relation.Datum;
@@ -47,74 +47,12 @@ import java.util.Optional;
  * (modulus of the datum less that of its object, mag) when present.
  */
 public final class VelocityDistance implements Rung<VelocityDistance> {
-    private static final String ETA = "log Hubble constant";
-    private static final String VELOCITY = "velocity";
-    private static final String ERROR = "velocity error";
-    private static final String FACTOR = "expansion factor";
-    private static final String MODULUS = "expansion modulus";
     private static final double TYPICAL = 70;
 
     private final Definition definition;
-    private final Form form;
+    private final FlowForm form;
 
-    /** How the rung is set up. */
-    private record Form(double q0, double j0, boolean expansion, double peculiar, boolean magnitudes) {
-        String observable() {
-            return magnitudes ? MODULUS : VELOCITY;
-        }
-
-        double[] factors(Observations data) {
-            double[] f = data.column(VELOCITY);
-            for (int i = 0; i < f.length; i++) {
-                f[i] = expansion ? Cosmography.f(f[i] / Cosmography.LIGHT_KM_PER_S, q0, j0) : 1;
-                if (!(f[i] > 0)) {
-                    throw fault(
-                            data,
-                            i,
-                            "the expansion to third order has come to f(z) = " + Figures.significant(f[i], 3)
-                                    + " there, and means nothing",
-                            "leave the datum out, or give distances computed by a cosmological model");
-                }
-            }
-            return f;
-        }
-
-        /** Standard deviations of the observable that the columns tell. */
-        double[] sigmas(Observations data) {
-            double[] v = data.column(VELOCITY);
-            double[] errors = data.column(ERROR);
-            for (int i = 0; i < v.length; i++) {
-                double sigma = Math.sqrt(errors[i] * errors[i] + peculiar * peculiar);
-                errors[i] = magnitudes ? Distances.modulusError(sigma / v[i]) : sigma;
-            }
-            return errors;
-        }
-
-        double[] moduli(Observations data, double[] f) {
-            double[] y = data.column(VELOCITY);
-            for (int i = 0; i < y.length; i++) {
-                if (!(y[i] > 0)) {
-                    throw fault(
-                            data,
-                            i,
-                            "the magnitude form takes the logarithm of the velocity",
-                            "use the velocity form, or leave the datum out");
-                }
-                y[i] = 5 * StrictMath.log10(y[i] * f[i]) + 25;
-            }
-            return y;
-        }
-
-        private static ValueFault fault(Observations data, int datum, String rule, String repair) {
-            return new ValueFault(
-                    "velocity = " + Figures.significant(data.column(VELOCITY)[datum], 6) + " km/s",
-                    rule,
-                    data.label() + ", datum \"" + data.names().get(datum) + "\"",
-                    repair);
-        }
-    }
-
-    private VelocityDistance(Definition definition, Form form) {
+    private VelocityDistance(Definition definition, FlowForm form) {
         this.definition = definition;
         this.form = form;
     }
@@ -127,15 +65,14 @@ public final class VelocityDistance implements Rung<VelocityDistance> {
      * @return the rung
      */
     public static VelocityDistance of(String name, Observations data) {
-        Observations full = data.has(VELOCITY) ? data : withVelocity(data);
-        full.require(VELOCITY, Unit.KILOMETRE_PER_SECOND);
-        double[] errors = full.errors(ERROR, Unit.KILOMETRE_PER_SECOND);
+        Observations full = data.has(FlowForm.VELOCITY) ? data : withVelocity(data);
+        full.require(FlowForm.VELOCITY, Unit.KILOMETRE_PER_SECOND);
+        double[] errors = full.errors(FlowForm.ERROR, Unit.KILOMETRE_PER_SECOND);
         Source eta = Source.free(name + " 5 log H0", Unit.MAGNITUDE).starting(5 * StrictMath.log10(TYPICAL));
-        Definition bare = Definition.of(name, full, VELOCITY, Equated.of((mu, at) -> mu))
+        Definition bare = Definition.of(name, full, FlowForm.VELOCITY, Equated.of((mu, at) -> mu))
                 .withNoise(Noise.of(errors))
-                .parameter(ETA, eta);
-        Form plain = new Form(-0.55, 1, true, 0, false);
-        return new VelocityDistance(bare, plain).with(plain);
+                .parameter(FlowForm.ETA, eta);
+        return new VelocityDistance(bare, FlowForm.PLAIN).with(FlowForm.PLAIN);
     }
 
     private static Observations withVelocity(Observations data) {
@@ -146,38 +83,43 @@ public final class VelocityDistance implements Rung<VelocityDistance> {
             z[i] *= Cosmography.LIGHT_KM_PER_S;
             errors[i] *= Cosmography.LIGHT_KM_PER_S;
         }
-        return data.with(VELOCITY, Unit.KILOMETRE_PER_SECOND, z).with(ERROR, Unit.KILOMETRE_PER_SECOND, errors);
+        return data.with(FlowForm.VELOCITY, Unit.KILOMETRE_PER_SECOND, z)
+                .with(FlowForm.ERROR, Unit.KILOMETRE_PER_SECOND, errors);
     }
 
     /** The rung in another form; its columns are computed from the velocities each time. */
-    private VelocityDistance with(Form next) {
+    private VelocityDistance with(FlowForm next) {
         Observations data = definition.data();
         double[] f = next.factors(data);
-        Observations full = data.with(FACTOR, Unit.NONE, f);
-        if (next.magnitudes) {
-            full = full.with(MODULUS, Unit.MAGNITUDE, next.moduli(data, f));
+        Observations full = data.with(FlowForm.FACTOR, Unit.NONE, f);
+        if (next.magnitudes()) {
+            full = full.with(FlowForm.MODULUS, Unit.MAGNITUDE, next.moduli(data, f));
         }
         Definition fresh = Definition.of(name(), full, next.observable(), relation(next, Requirements.offsets(data)))
                 .restingOn(definition.restsOn())
                 .withCalibrators(definition.calibrators())
                 .withNoise(noise(next))
-                .described(next.magnitudes ? "5 log(c z f(z)) + 25 = mu + 5 log H0" : "c z f(z) = H0 d");
-        return new VelocityDistance(
-                logHubbleConstant() instanceof SourceGroup.Member member
-                        ? withEta(fresh.parameter(ETA, member))
-                        : withEta(fresh.parameter(ETA, (Source) logHubbleConstant())),
-                next);
+                .described(next.magnitudes() ? "5 log(c z f(z)) + 25 = mu + 5 log H0" : "c z f(z) = H0 d");
+        return new VelocityDistance(withParameters(fresh, next), next);
     }
 
-    private static Equated relation(Form form, boolean apart) {
-        Equated relation = form.magnitudes
-                ? Equated.of((mu, at) -> mu.add(at.parameter(ETA)))
-                : Equated.of((mu, at) -> at.parameter(ETA)
-                                .add(mu)
-                                .subtract(25)
-                                .divide(5)
-                                .tenTo()
-                                .divide(at.column(FACTOR)))
+    private Definition withParameters(Definition fresh, FlowForm next) {
+        Definition out = fresh;
+        for (String role : definition.parameters().keySet()) {
+            if (!next.varied() && (role.equals(FlowForm.Q0) || role.equals(FlowForm.J0))) {
+                continue;
+            }
+            out = definition.value(role) instanceof SourceGroup.Member member
+                    ? out.parameter(role, member)
+                    : out.parameter(role, (Source) definition.value(role));
+        }
+        return withEta(out);
+    }
+
+    private static Equated relation(FlowForm form, boolean apart) {
+        Equated relation = form.magnitudes()
+                ? Equated.of(form::modulus)
+                : Equated.of(form::velocity)
                         .startingAt(d -> start(d) - (apart ? d.column(Requirements.OFFSETS) : 0))
                         .refusing(d -> refusal(d.observed()));
         return apart ? relation.withOffsets(Requirements.OFFSETS) : relation;
@@ -185,17 +127,17 @@ public final class VelocityDistance implements Rung<VelocityDistance> {
 
     /** Noise of unknown size has no sigma yet; the column's error then keeps one that approaches from infinity. */
     private static double start(Datum d) {
-        double sigma = d.sigma() > 0 ? d.sigma() : d.column(ERROR);
+        double sigma = d.sigma() > 0 ? d.sigma() : d.column(FlowForm.ERROR);
         return 5 * StrictMath.log10(Math.max(d.observed(), sigma) / TYPICAL) + 25;
     }
 
     /** The columns' errors in another form; noise that the user gave is kept, or refused where it cannot be. */
-    private Noise noise(Form next) {
+    private Noise noise(FlowForm next) {
         Noise now = definition.noise();
         boolean columns = ColumnNoise.is(now, form.sigmas(definition.data()));
-        boolean rescaled = next.magnitudes != form.magnitudes;
+        boolean rescaled = next.magnitudes() != form.magnitudes();
         boolean sized = ColumnNoise.hasMore(now) || !(columns || ColumnNoise.isNone(now));
-        if ((rescaled && sized) || (next.peculiar != form.peculiar && !columns)) {
+        if ((rescaled && sized) || (next.peculiar() != form.peculiar() && !columns)) {
             throw new ValueFault(
                     rescaled ? "noise or scatter in " + Unit.KILOMETRE_PER_SECOND.symbol() : "noise of its own",
                     rescaled
@@ -210,7 +152,7 @@ public final class VelocityDistance implements Rung<VelocityDistance> {
     }
 
     private static Definition withEta(Definition definition) {
-        return definition.highlighting(List.of(hubble(definition.value(ETA))));
+        return definition.highlighting(List.of(hubble(definition.value(FlowForm.ETA))));
     }
 
     private static Derived hubble(Value eta) {
@@ -236,7 +178,98 @@ public final class VelocityDistance implements Rung<VelocityDistance> {
      * @return the rung
      */
     public VelocityDistance withExpansion(double q0, double j0) {
-        return with(new Form(q0, j0, true, form.peculiar, form.magnitudes));
+        return with(form.expanding(q0, j0, true, false));
+    }
+
+    /**
+     * The same relation with the parameters of the expansion as sources, which then have their share in error budgets.
+     *
+     * @param q0 source of the deceleration parameter
+     * @param j0 source of the jerk parameter
+     * @return the rung
+     */
+    public VelocityDistance withExpansion(Source q0, Source j0) {
+        Requirements.unit(name(), FlowForm.Q0, q0, Unit.NONE);
+        Requirements.unit(name(), FlowForm.J0, j0, Unit.NONE);
+        Definition d = definition.parameter(FlowForm.Q0, q0).parameter(FlowForm.J0, j0);
+        return new VelocityDistance(d, form).with(form.expanding(q0.mean()[0], j0.mean()[0], true, true));
+    }
+
+    /**
+     * The same relation with a common velocity added to all, as a diagnostic: the relation itself has no intercept.
+     *
+     * @param source the intercept, a velocity
+     * @return the rung
+     */
+    public VelocityDistance withIntercept(Source source) {
+        double[] one = new double[definition.data().size()];
+        java.util.Arrays.fill(one, 1);
+        return withFlow("intercept", source, one);
+    }
+
+    /**
+     * The same relation with a bulk motion: velocities of all galaxies, and of the observer, along three axes.
+     *
+     * <p>{@code v + x cos(dec) cos(ra) + y cos(dec) sin(ra) + z sin(dec)}, from the columns {@code right ascension} and
+     * {@code declination} (degrees). In magnitudes it enters to first order in velocity.
+     *
+     * @param x source of the velocity towards ra 0, dec 0
+     * @param y source of the velocity towards ra 90, dec 0
+     * @param z source of the velocity towards the north pole
+     * @return the rung
+     */
+    public VelocityDistance withBulkMotion(Source x, Source y, Source z) {
+        definition.data().require("right ascension", Unit.DEGREE);
+        definition.data().require("declination", Unit.DEGREE);
+        double[] ra = definition.data().column("right ascension");
+        double[] dec = definition.data().column("declination");
+        double[][] n = new double[3][ra.length];
+        for (int i = 0; i < ra.length; i++) {
+            double a = ra[i] * StrictMath.PI / 180;
+            double d = dec[i] * StrictMath.PI / 180;
+            n[0][i] = StrictMath.cos(d) * StrictMath.cos(a);
+            n[1][i] = StrictMath.cos(d) * StrictMath.sin(a);
+            n[2][i] = StrictMath.sin(d);
+        }
+        return withFlow("motion x", x, n[0]).withFlow("motion y", y, n[1]).withFlow("motion z", z, n[2]);
+    }
+
+    private VelocityDistance withFlow(String role, Source source, double[] column) {
+        Requirements.unit(name(), role, source, Unit.KILOMETRE_PER_SECOND);
+        Definition d = definition
+                .withData(definition.data().with(role, Unit.NONE, column), definition.noise())
+                .parameter(role, source);
+        return new VelocityDistance(d, form).with(form.with(role));
+    }
+
+    /**
+     * A parameter by its role: "intercept", "motion x", "deceleration parameter" and so on.
+     *
+     * @param role its role
+     * @return its handle
+     */
+    public Value parameter(String role) {
+        return definition.value(role);
+    }
+
+    /**
+     * Heliocentric redshifts brought to another frame, by composition.
+     *
+     * @param data columns {@code redshift} (heliocentric), {@code right ascension} and {@code declination} (degrees)
+     * @param frame the frame wanted
+     * @return the table with its redshifts in that frame
+     */
+    public static Observations inFrame(Observations data, Frame frame) {
+        data.require("redshift", Unit.REDSHIFT);
+        data.require("right ascension", Unit.DEGREE);
+        data.require("declination", Unit.DEGREE);
+        double[] z = data.column("redshift");
+        double[] ra = data.column("right ascension");
+        double[] dec = data.column("declination");
+        for (int i = 0; i < z.length; i++) {
+            z[i] = frame.redshift(z[i], ra[i], dec[i]);
+        }
+        return data.with("redshift", Unit.REDSHIFT, z);
     }
 
     /**
@@ -245,7 +278,7 @@ public final class VelocityDistance implements Rung<VelocityDistance> {
      * @return the rung
      */
     public VelocityDistance withoutExpansionTerms() {
-        return with(new Form(0, 0, false, form.peculiar, form.magnitudes));
+        return with(form.expanding(0, 0, false, false));
     }
 
     /**
@@ -264,7 +297,7 @@ public final class VelocityDistance implements Rung<VelocityDistance> {
                     "rung \"" + name() + "\"",
                     "give its standard deviation");
         }
-        return with(new Form(form.q0, form.j0, form.expansion, sigma, form.magnitudes));
+        return with(form.scattered(sigma));
     }
 
     /**
@@ -273,7 +306,7 @@ public final class VelocityDistance implements Rung<VelocityDistance> {
      * @return the rung; refused when a velocity is not above zero, or when scatter or noise in km/s was given before
      */
     public VelocityDistance inMagnitudes() {
-        return with(new Form(form.q0, form.j0, form.expansion, form.peculiar, true));
+        return with(form.inMagnitudes());
     }
 
     /**
@@ -283,8 +316,8 @@ public final class VelocityDistance implements Rung<VelocityDistance> {
      * @return the rung
      */
     public VelocityDistance withLogHubbleConstant(Source source) {
-        Requirements.unit(name(), ETA, source, Unit.MAGNITUDE);
-        return like(withEta(definition.parameter(ETA, source)));
+        Requirements.unit(name(), FlowForm.ETA, source, Unit.MAGNITUDE);
+        return like(withEta(definition.parameter(FlowForm.ETA, source)));
     }
 
     /**
@@ -294,8 +327,8 @@ public final class VelocityDistance implements Rung<VelocityDistance> {
      * @return the rung
      */
     public VelocityDistance withLogHubbleConstant(SourceGroup.Member member) {
-        Requirements.unit(name(), ETA, member, Unit.MAGNITUDE);
-        return like(withEta(definition.parameter(ETA, member)));
+        Requirements.unit(name(), FlowForm.ETA, member, Unit.MAGNITUDE);
+        return like(withEta(definition.parameter(FlowForm.ETA, member)));
     }
 
     /**
@@ -313,7 +346,7 @@ public final class VelocityDistance implements Rung<VelocityDistance> {
      * @return handle of the unknown itself, mag
      */
     public Value logHubbleConstant() {
-        return definition.value(ETA);
+        return definition.value(FlowForm.ETA);
     }
 
     @Override

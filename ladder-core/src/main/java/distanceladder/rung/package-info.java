@@ -21,7 +21,8 @@
  * }</pre>
  *
  * <p>What does not belong here: solving, which is the ladder's; files; and anything that two families would share beyond
- * the checks of a table. No family knows another.
+ * the checks of a table. No family knows another. A new kind of rung is one class that implements {@link
+ * distanceladder.relation.Rung}, in any package.
  */
 @NullMarked
 package distanceladder.rung;

@@ -199,6 +199,39 @@ final class DenseReference {
         return sum;
     }
 
+    /** Left side of a datum's row at the solution. */
+    double rowValue(Linearised linear, Definition d, int i) {
+        double[] c = rowCombination(linear, d, i);
+        double sum = -c[values.length];
+        for (int j = 0; j < values.length; j++) {
+            sum += c[j] * values[j];
+        }
+        return sum;
+    }
+
+    double rowVariance(Linearised linear, Definition d, int i) {
+        double[] c = rowCombination(linear, d, i);
+        double sum = 0;
+        for (int j = 0; j < values.length; j++) {
+            for (int k = 0; k < values.length; k++) {
+                sum += c[j] * covariance.getEntry(j, k) * c[k];
+            }
+        }
+        return sum;
+    }
+
+    private double[] rowCombination(Linearised linear, Definition d, int i) {
+        double[] c = new double[columns.size() + 1];
+        for (int j = 0; j < linear.unknowns().size(); j++) {
+            place(c, linear.unknowns().name(j), linear.rows()[i][j]);
+        }
+        String object = d.data().objects().get(i);
+        if (!object.isEmpty()) {
+            c[columns.get(Ladder.unknown(object))] += linear.coefficients()[i];
+        }
+        return c;
+    }
+
     double chiSquare() {
         return chiSquare;
     }

@@ -101,6 +101,22 @@ class ParallaxesTest {
     }
 
     @Test
+    void offsetsMayBeLinearInColumns() {
+        double[] colour = {0.5, 1.5, -1};
+        Parallaxes full = Parallaxes.of("p", STARS.with("colour", Unit.MAGNITUDE, colour))
+                .withOffset(OFFSET)
+                .withOffsetTerm("colour", GROUP.member("faint"));
+        Slopes.agree(
+                full,
+                10,
+                (i, mu, s) -> Slopes.tenTo((10 - mu) / 5)
+                        + s.applyAsDouble("offset")
+                        + s.applyAsDouble("offset by colour") * colour[i]);
+        assertThrows(NameFault.class, () -> full.withOffsetTerm("color", OFFSET));
+        assertThrows(ValueFault.class, () -> full.withOffsetTerm("colour", Source.free("x", Unit.MAGNITUDE)));
+    }
+
+    @Test
     void whatDoesNotFitIsRefused() {
         NameFault missing = assertThrows(
                 NameFault.class, () -> Parallaxes.of("p", STARS.renamed("parallax error", "paralax error")));

@@ -114,6 +114,39 @@ class PeriodLuminosityTest {
     }
 
     @Test
+    void breaksAndOvertones() {
+        double[] overtone = {1, 0, 0};
+        PeriodLuminosity full = PeriodLuminosity.of("pl", STARS.with("first overtone", Unit.NONE, overtone))
+                .withBreak(1.1, Source.free("steeper", Unit.MAGNITUDE_PER_DEX))
+                .withOvertones("first overtone", Source.free("brighter", Unit.MAGNITUDE));
+        Slopes.agree(
+                full,
+                25,
+                (i, mu, s) -> mu
+                        + s.applyAsDouble("zero point")
+                        + s.applyAsDouble("slope") * (LOG_PERIOD[i] - 1)
+                        + s.applyAsDouble("break") * (LOG_PERIOD[i] < 1.1 ? LOG_PERIOD[i] - 1.1 : 0)
+                        + s.applyAsDouble("overtone offset") * overtone[i]);
+        assertFalse(Slopes.curved(full));
+        Source length = Source.free("length", Unit.MEGAPARSEC);
+        assertThrows(ValueFault.class, () -> full.withBreak(1.1, length));
+        assertThrows(ValueFault.class, () -> full.withBreak(Double.NaN, METALS));
+        assertThrows(ValueFault.class, () -> full.withOvertones("first overtone", length));
+        assertThrows(NameFault.class, () -> full.withOvertones("overtone", METALS));
+    }
+
+    @Test
+    void aColourHasErrors() {
+        Observations coloured = STARS.with("V - I", Unit.MAGNITUDE, 0.7, 0.8, 0.9);
+        assertThrows(NameFault.class, () -> PeriodLuminosity.of("pl", coloured).withColour("V - I", METALS));
+        PeriodLuminosity full = PeriodLuminosity.of(
+                        "pl", coloured.with("V - I error", Unit.MAGNITUDE, 0.02, 0.02, 0.03))
+                .withColour("V - I", GROUP.member("slope"));
+        assertEquals(List.of("V - I"), full.definition().relation().uncertain());
+        assertTrue(Slopes.curved(full));
+    }
+
+    @Test
     void whatDoesNotFitIsRefused() {
         assertThrows(NameFault.class, () -> PeriodLuminosity.of("pl", STARS.renamed("magnitude", "mag")));
         assertThrows(NameFault.class, () -> PeriodLuminosity.of("pl", STARS.renamed("log period", "logP")));

@@ -86,6 +86,23 @@ class SecondaryIndicatorTest {
     }
 
     @Test
+    void aCovariateIsExactOrUncertainNotBoth() {
+        SecondaryIndicator si =
+                SecondaryIndicator.of("si", EVENTS.with("colour error", Unit.MAGNITUDE, 0.01, 0.02, 0.03));
+        SecondaryIndicator uncertain =
+                si.withCovariate("colour").withUncertainCovariate("colour", GROUP.member("colour"));
+        assertEquals(List.of("colour"), uncertain.definition().relation().uncertain());
+        assertEquals("m = mu + M + c(colour) colour", uncertain.definition().description());
+        SecondaryIndicator exact = uncertain.withCovariate("colour");
+        assertEquals(List.of(), exact.definition().relation().uncertain());
+        Slopes.agree(
+                exact,
+                31,
+                (i, mu, s) -> mu + s.applyAsDouble("zero point") + s.applyAsDouble("colour coefficient") * COLOUR[i]);
+        assertThrows(NameFault.class, () -> rung.withUncertainCovariate("colour"));
+    }
+
+    @Test
     void whatDoesNotFitIsRefused() {
         NameFault column = assertThrows(NameFault.class, () -> rung.withCovariate("color"));
         assertTrue(column.repair().contains("colour"), column.getMessage());

@@ -13,6 +13,7 @@ import distanceladder.astro.Unit;
 import distanceladder.covariance.Dense;
 import distanceladder.ladder.Estimate;
 import distanceladder.ladder.Ladder;
+import distanceladder.relation.Amount;
 import distanceladder.relation.Definition;
 import distanceladder.relation.JointNoise;
 import distanceladder.relation.Linearised;
@@ -262,6 +263,71 @@ class VelocityDistanceTest {
         VelocityDistance shared = flow.withLogHubbleConstant(GROUP.member("eta"));
         assertEquals("published: eta", shared.hubbleConstant().inputs().get(0).name());
         assertEquals(1, shared.inMagnitudes().definition().highlights().size());
+    }
+
+    @Test
+    void flowsAddToVelocities() {
+        double[] ra = {10, 130, 250};
+        double[] dec = {-40, 5, 60};
+        VelocityDistance moving = VelocityDistance.of(
+                        "flow",
+                        GALAXIES.with("right ascension", Unit.DEGREE, ra).with("declination", Unit.DEGREE, dec))
+                .withEstimatedScatter()
+                .withBulkMotion(velocitySource("x"), velocitySource("y"), velocitySource("z"))
+                .withIntercept(velocitySource("all"));
+        assertEquals(Noise.Scatter.ESTIMATED, moving.definition().noise().mode());
+        Slopes.agree(moving, 34, (i, mu, s) -> velocity(-0.55, 1).of(i, mu, s) + motion(ra[i], dec[i], s));
+        VelocityDistance far = moving.inMagnitudes();
+        Slopes.agree(
+                far,
+                34,
+                (i, mu, s) -> mu
+                        + s.applyAsDouble("log Hubble constant")
+                        + 5 / StrictMath.log(10) * motion(ra[i], dec[i], s) / VELOCITY[i]);
+        assertFalse(Slopes.curved(far));
+        assertThrows(ValueFault.class, () -> flow.withIntercept(Source.free("m", Unit.MAGNITUDE)));
+    }
+
+    private static Source velocitySource(String name) {
+        return Source.normal(name, kilometresPerSecond(0).plusMinus(100));
+    }
+
+    private static double motion(double ra, double dec, java.util.function.ToDoubleFunction<String> s) {
+        double a = StrictMath.toRadians(ra);
+        double d = StrictMath.toRadians(dec);
+        return s.applyAsDouble("intercept")
+                + s.applyAsDouble("motion x") * StrictMath.cos(d) * StrictMath.cos(a)
+                + s.applyAsDouble("motion y") * StrictMath.cos(d) * StrictMath.sin(a)
+                + s.applyAsDouble("motion z") * StrictMath.sin(d);
+    }
+
+    @Test
+    void theExpansionMayBeUncertain() {
+        Source q0 = Source.normal("q0", new Amount(-0.5, 0.1, Unit.NONE));
+        Source j0 = Source.normal("j0", new Amount(1, 0.3, Unit.NONE));
+        VelocityDistance varied = flow.withExpansion(q0, j0);
+        Slopes.agree(
+                varied,
+                34,
+                (i, mu, s) -> velocity(s.applyAsDouble("deceleration parameter"), s.applyAsDouble("jerk parameter"))
+                        .of(i, mu, s));
+        Slopes.agree(
+                varied.inMagnitudes(),
+                34,
+                (i, mu, s) -> mu
+                        + s.applyAsDouble("log Hubble constant")
+                        - 5
+                                * StrictMath.log10(f(
+                                                VELOCITY[i],
+                                                s.applyAsDouble("deceleration parameter"),
+                                                s.applyAsDouble("jerk parameter"))
+                                        / f(VELOCITY[i], -0.5, 1)));
+        assertTrue(Slopes.curved(varied.inMagnitudes()));
+        assertEquals(
+                List.of("log Hubble constant"),
+                List.copyOf(
+                        varied.withoutExpansionTerms().definition().parameters().keySet()));
+        assertThrows(ValueFault.class, () -> flow.withExpansion(q0, Source.free("j", Unit.MAGNITUDE)));
     }
 
     @Test

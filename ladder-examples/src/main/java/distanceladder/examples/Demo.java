@@ -5,8 +5,10 @@ import static distanceladder.relation.Amount.modulus;
 
 import distanceladder.ladder.Change;
 import distanceladder.ladder.Solution;
+import distanceladder.text.Fault;
 import java.io.PrintStream;
 import java.nio.charset.StandardCharsets;
+import java.nio.file.Path;
 
 /** The main job on the ladder of an invented observatory: built, solved, explained and revised. */
 public final class Demo {
@@ -19,10 +21,20 @@ public final class Demo {
     /**
      * Runs it.
      *
-     * @param args none
+     * @param args none for the demo; or a folder with a ladder of one's own
      */
     public static void main(String[] args) {
-        new Demo(new PrintStream(System.out, true, StandardCharsets.UTF_8)).run();
+        PrintStream out = new PrintStream(System.out, true, StandardCharsets.UTF_8);
+        if (args.length == 0) {
+            new Demo(out).run();
+            return;
+        }
+        try {
+            OwnLadder.run(Path.of(args[0]), out);
+        } catch (Fault fault) {
+            out.println(fault.getMessage());
+            System.exit(2);
+        }
     }
 
     private void run() {
@@ -51,6 +63,9 @@ public final class Demo {
                 "correlation with the parallax offset %.3f, with the camera zero point %.3f%n%n",
                 solution.correlation(skerry.flow.hubbleConstant(), skerry.offset),
                 solution.correlation(skerry.flow.hubbleConstant(), skerry.camera));
+
+        title("Can the error bar be believed? The whole ladder drawn by Monte Carlo");
+        show(solution.draw(1, 500, skerry.flow.hubbleConstant(), skerry.pulsators.zeroPoint(), skerry.offset));
 
         title("""
                 What if the parallax offset were -0.030 mas instead of -0.020 mas?
