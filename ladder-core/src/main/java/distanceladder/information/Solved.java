@@ -6,6 +6,8 @@ import java.util.Arrays;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Set;
+import java.util.TreeSet;
 
 /**
  * A merged triangle with the priors of its unknowns, solved.
@@ -116,15 +118,44 @@ public final class Solved {
 
     private void testRank(Triangle merged) {
         double limit = EPSILON * Math.max(64, merged.count() + columns);
+        boolean[] deficient = new boolean[free.size()];
+        int found = 0;
         for (int j = 0; j < free.size(); j++) {
-            double length = merged.length(merged.unknowns().column(names.get(j)));
-            if (!(Math.abs(r[j][j]) > limit * length)) {
-                throw deficient(merged, j);
-            }
+            deficient[j] = !(Math.abs(r[j][j]) > limit * length(merged, j));
+            found += deficient[j] ? 1 : 0;
+        }
+        if (found > 0) {
+            throw deficient(merged, deficient, found);
         }
     }
 
-    private RankFault deficient(Triangle merged, int j) {
+    private double length(Triangle merged, int j) {
+        return merged.length(merged.unknowns().column(names.get(j)));
+    }
+
+    private RankFault deficient(Triangle merged, boolean[] deficient, int found) {
+        Set<String> together = new TreeSet<>();
+        for (int j = 0; j < deficient.length; j++) {
+            if (deficient[j]) {
+                together.addAll(nullVector(merged, deficient, j));
+            }
+        }
+        String list = String.join(", ", together);
+        String what = together.size() == 1
+                ? list + " is not determined"
+                : found == 1
+                        ? "only a combination is determined of: " + list
+                        : "not determined, alone or but in combination: " + list;
+        return new RankFault(
+                what,
+                "every free parameter is fixed by the data of the rungs that are solved together, or has a prior",
+                "",
+                "add a calibrator or an anchor, give one of them a value or a prior, or take the rung out of the set",
+                List.copyOf(together));
+    }
+
+    /** The unknowns of the null vector that column j closes, other deficient columns left at zero. */
+    private List<String> nullVector(Triangle merged, boolean[] deficient, int j) {
         double[] x = new double[j + 1];
         x[j] = 1;
         for (int i = j - 1; i >= 0; i--) {
@@ -132,28 +163,20 @@ public final class Solved {
             for (int k = i + 1; k <= j; k++) {
                 sum -= r[i][k] * x[k];
             }
-            x[i] = sum / r[i][i];
+            x[i] = deficient[i] ? 0 : sum / r[i][i];
         }
         double largest = 0;
         for (int i = 0; i <= j; i++) {
-            x[i] = Math.abs(x[i] * merged.length(merged.unknowns().column(names.get(i))));
+            x[i] = Math.abs(x[i] * length(merged, i));
             largest = Math.max(largest, x[i]);
         }
-        List<String> together = new ArrayList<>();
+        List<String> out = new ArrayList<>();
         for (int i = 0; i <= j; i++) {
             if (x[i] >= 1e-6 * largest) {
-                together.add(names.get(i));
+                out.add(names.get(i));
             }
         }
-        String what = together.size() == 1
-                ? together.get(0) + " is not determined"
-                : "only a combination is determined of: " + String.join(", ", together);
-        return new RankFault(
-                what,
-                "every free parameter is fixed by the data of the rungs that are solved together, or has a prior",
-                "",
-                "add a calibrator or an anchor, give one of them a value or a prior, or take the rung out of the set",
-                together);
+        return out;
     }
 
     /**

@@ -1,6 +1,7 @@
 package distanceladder.rung;
 
 import distanceladder.astro.Unit;
+import distanceladder.covariance.Diagonal;
 import distanceladder.relation.Amount;
 import distanceladder.relation.Definition;
 import distanceladder.relation.Distance;
@@ -171,7 +172,13 @@ public final class Anchor implements Rung<Anchor> {
     }
 
     private Anchor systematic(Value part, Definition changed) {
-        Requirements.unit(name(), SYSTEMATIC + " part", part, given.unit());
+        if (!part.unit().dimension().equals(given.unit().dimension())) {
+            throw new ValueFault(
+                    "systematic part \"" + part.name() + "\" in " + part.unit().symbol(),
+                    "the systematic part is in a unit of what is given",
+                    "anchor \"" + name() + "\"",
+                    "give it in " + given.unit().symbol());
+        }
         return like(changed.withRelation(relation(given.unit(), true, name()))
                 .described(words(given.unit()) + " + s = given"));
     }
@@ -204,14 +211,15 @@ public final class Anchor implements Rung<Anchor> {
         if (sigma(other) == sigma(given)) {
             return now;
         }
-        if (!ColumnNoise.is(now, sigma(given))) {
+        if (now.mode() == Noise.Scatter.EXACT
+                || !now.covariance().equals(Diagonal.fromStandardDeviations(sigma(given)))) {
             throw new ValueFault(
                     "standard deviation = " + other.sigma() + " " + other.unit().symbol(),
                     "an anchor whose noise was replaced keeps that noise",
                     "anchor \"" + name() + "\"",
                     "give the value alone, and the new noise by withNoise");
         }
-        return ColumnNoise.replaced(now, sigma(other));
+        return now.withCovariance(Diagonal.fromStandardDeviations(sigma(other)));
     }
 
     /**

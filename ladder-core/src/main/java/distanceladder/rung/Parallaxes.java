@@ -41,7 +41,8 @@ import java.util.Optional;
  */
 public final class Parallaxes implements Rung<Parallaxes> {
     private static final String OFFSET = "offset";
-    private static final String ERROR = "parallax error";
+    private static final String APART = "offset";
+    private static final double SMALLEST = 1e-3;
 
     private final Definition definition;
     private final List<String> columns;
@@ -60,7 +61,10 @@ public final class Parallaxes implements Rung<Parallaxes> {
      */
     public static Parallaxes of(String name, Observations data) {
         data.require("parallax", Unit.MILLIARCSECOND);
-        double[] errors = data.errors(ERROR, Unit.MILLIARCSECOND);
+        if (data.has(APART)) {
+            data.require(APART, Unit.MAGNITUDE);
+        }
+        double[] errors = data.errors("parallax error", Unit.MILLIARCSECOND);
         Definition definition = Definition.of(name, data, "parallax", Equated.of((mu, at) -> mu))
                 .withNoise(Noise.of(errors))
                 .parameter(OFFSET, Source.exact(name + " offset", Amount.milliarcseconds(0)));
@@ -69,7 +73,7 @@ public final class Parallaxes implements Rung<Parallaxes> {
 
     private Parallaxes related() {
         List<String> linear = columns;
-        boolean apart = Requirements.offsets(definition.data());
+        boolean apart = definition.data().has(APART);
         Equated relation = Equated.of((modulus, at) -> {
                     Dual p = modulus.negate().add(10).divide(5).tenTo().add(at.parameter(OFFSET));
                     for (String x : linear) {
@@ -77,20 +81,29 @@ public final class Parallaxes implements Rung<Parallaxes> {
                     }
                     return p;
                 })
-                .startingAt(d -> start(d) - (apart ? d.column(Requirements.OFFSETS) : 0))
+                .startingAt(d -> start(d) - (apart ? d.column(APART) : 0))
                 .refusing(d -> refusal(corrected(d, linear)));
         String words = "p = 10^((10 - mu)/5) + offset"
                 + String.join(
                         "", columns.stream().map(x -> " + k(" + x + ") " + x).toList())
                 + ", offset observed minus true";
-        Equated full = apart ? relation.withOffsets(Requirements.OFFSETS) : relation;
+        Equated full = apart ? relation.withOffsets(APART) : relation;
         return new Parallaxes(definition.withRelation(full).described(words), columns);
     }
 
-    /** Noise of unknown size has no sigma yet; the column's error then keeps a negative parallax from infinity. */
     private static double start(Datum d) {
-        double sigma = d.sigma() > 0 ? d.sigma() : d.column(ERROR);
-        return Distances.modulusFromParallax(Math.max(d.observed(), sigma));
+        return Distances.modulusFromParallax(Math.max(Math.max(d.observed(), d.sigma()), SMALLEST));
+    }
+
+    private void requireParallax(String role, Value parameter) {
+        if (!parameter.unit().dimension().equals(Unit.MILLIARCSECOND.dimension())) {
+            throw new ValueFault(
+                    role + " \"" + parameter.name() + "\" in "
+                            + parameter.unit().symbol(),
+                    "the " + role + " is in " + Unit.MILLIARCSECOND.symbol(),
+                    "rung \"" + name() + "\"",
+                    "give a source in a unit of parallax");
+        }
     }
 
     private static String term(String column) {
@@ -130,7 +143,7 @@ public final class Parallaxes implements Rung<Parallaxes> {
 
     private Parallaxes termed(String column, Value coefficient, Definition changed) {
         changed.data().unit(column);
-        Requirements.unit(name(), term(column), coefficient, Unit.MILLIARCSECOND);
+        requireParallax(term(column), coefficient);
         List<String> more = new ArrayList<>(columns);
         if (!more.contains(column)) {
             more.add(column);
@@ -196,7 +209,7 @@ public final class Parallaxes implements Rung<Parallaxes> {
      * @return the rung
      */
     public Parallaxes withOffset(Source offset) {
-        Requirements.unit(name(), OFFSET, offset, Unit.MILLIARCSECOND);
+        requireParallax(OFFSET, offset);
         return like(definition.parameter(OFFSET, offset));
     }
 
@@ -207,7 +220,7 @@ public final class Parallaxes implements Rung<Parallaxes> {
      * @return the rung
      */
     public Parallaxes withOffset(SourceGroup.Member offset) {
-        Requirements.unit(name(), OFFSET, offset, Unit.MILLIARCSECOND);
+        requireParallax(OFFSET, offset);
         return like(definition.parameter(OFFSET, offset));
     }
 

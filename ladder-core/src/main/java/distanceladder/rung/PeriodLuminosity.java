@@ -43,6 +43,7 @@ public final class PeriodLuminosity implements Rung<PeriodLuminosity> {
     private static final String BREAK = "break";
     private static final String OVERTONE = "overtone offset";
     private static final String COMMON = "common offset ";
+    private static final String APART = "offset";
 
     private final Definition definition;
     private final double pivot;
@@ -69,7 +70,9 @@ public final class PeriodLuminosity implements Rung<PeriodLuminosity> {
         double[] errors = data.errors("magnitude error", Unit.MAGNITUDE);
         Observations full = data.has("log period") ? data : withLogPeriod(data);
         full.require("log period", Unit.LOG_DAY);
-        Requirements.offsets(full);
+        if (full.has(APART)) {
+            full.require(APART, Unit.MAGNITUDE);
+        }
         Definition definition = Definition.of(name, full, "magnitude", Equated.of((mu, at) -> mu))
                 .withNoise(Noise.of(errors))
                 .parameter(ZERO_POINT, Source.free(name + " zero point", Unit.MAGNITUDE))
@@ -156,10 +159,7 @@ public final class PeriodLuminosity implements Rung<PeriodLuminosity> {
                 + String.join("", terms.stream().map(t -> " + " + t.words).toList());
         return new PeriodLuminosity(
                 definition
-                        .withRelation(
-                                Requirements.offsets(definition.data())
-                                        ? relation.withOffsets(Requirements.OFFSETS)
-                                        : relation)
+                        .withRelation(definition.data().has(APART) ? relation.withOffsets(APART) : relation)
                         .described(words),
                 pivot,
                 terms);
@@ -170,6 +170,18 @@ public final class PeriodLuminosity implements Rung<PeriodLuminosity> {
         more.removeIf(t -> t.role.equals(term.role));
         more.add(term);
         return new PeriodLuminosity(changed, pivot, List.copyOf(more)).related();
+    }
+
+    private void requireUnit(String role, Value parameter, Unit... wanted) {
+        List<String> dimensions = Arrays.stream(wanted).map(Unit::dimension).toList();
+        if (!dimensions.contains(parameter.unit().dimension())) {
+            throw new ValueFault(
+                    role + " \"" + parameter.name() + "\" in "
+                            + parameter.unit().symbol(),
+                    "the " + role + " is a " + String.join(" or a ", dimensions),
+                    "rung \"" + name() + "\"",
+                    "give a source in such a unit");
+        }
     }
 
     private void requireFinite(String what, double logPeriod) {
@@ -216,7 +228,7 @@ public final class PeriodLuminosity implements Rung<PeriodLuminosity> {
     private Term colour(String column, Value ratio) {
         definition.data().errors(column + " error", Unit.MAGNITUDE);
         definition.data().require(column, Unit.MAGNITUDE);
-        Requirements.unit(name(), RATIO, ratio, Unit.NONE, Unit.MAGNITUDE);
+        requireUnit(RATIO, ratio, Unit.NONE, Unit.MAGNITUDE);
         return new Term(RATIO, "R " + column, column, (r, at) -> r.multiply(at.uncertain(column)));
     }
 
@@ -229,7 +241,7 @@ public final class PeriodLuminosity implements Rung<PeriodLuminosity> {
      */
     public PeriodLuminosity withBreak(double logPeriod, Source difference) {
         requireFinite("break", logPeriod);
-        Requirements.unit(name(), BREAK, difference, Unit.MAGNITUDE_PER_DEX, Unit.MAGNITUDE);
+        requireUnit(BREAK, difference, Unit.MAGNITUDE_PER_DEX, Unit.MAGNITUDE);
         Term term = new Term(
                 BREAK,
                 "db min(log P - " + logPeriod + ", 0)",
@@ -247,7 +259,7 @@ public final class PeriodLuminosity implements Rung<PeriodLuminosity> {
      */
     public PeriodLuminosity withOvertones(String column, Source offset) {
         definition.data().column(column);
-        Requirements.unit(name(), OVERTONE, offset, Unit.MAGNITUDE);
+        requireUnit(OVERTONE, offset, Unit.MAGNITUDE);
         Term term = new Term(OVERTONE, "o " + column, "", (o, at) -> o.multiply(at.column(column)));
         return with(term, definition.parameter(OVERTONE, offset));
     }
@@ -270,7 +282,7 @@ public final class PeriodLuminosity implements Rung<PeriodLuminosity> {
      * @return the rung
      */
     public PeriodLuminosity withZeroPoint(Source source) {
-        Requirements.unit(name(), ZERO_POINT, source, Unit.MAGNITUDE);
+        requireUnit(ZERO_POINT, source, Unit.MAGNITUDE);
         return like(definition.parameter(ZERO_POINT, source));
     }
 
@@ -281,7 +293,7 @@ public final class PeriodLuminosity implements Rung<PeriodLuminosity> {
      * @return the rung
      */
     public PeriodLuminosity withZeroPoint(SourceGroup.Member member) {
-        Requirements.unit(name(), ZERO_POINT, member, Unit.MAGNITUDE);
+        requireUnit(ZERO_POINT, member, Unit.MAGNITUDE);
         return like(definition.parameter(ZERO_POINT, member));
     }
 
@@ -292,7 +304,7 @@ public final class PeriodLuminosity implements Rung<PeriodLuminosity> {
      * @return the rung
      */
     public PeriodLuminosity withSlope(Source source) {
-        Requirements.unit(name(), SLOPE, source, Unit.MAGNITUDE_PER_DEX, Unit.MAGNITUDE);
+        requireUnit(SLOPE, source, Unit.MAGNITUDE_PER_DEX, Unit.MAGNITUDE);
         return like(definition.parameter(SLOPE, source));
     }
 
@@ -303,7 +315,7 @@ public final class PeriodLuminosity implements Rung<PeriodLuminosity> {
      * @return the rung
      */
     public PeriodLuminosity withSlope(SourceGroup.Member member) {
-        Requirements.unit(name(), SLOPE, member, Unit.MAGNITUDE_PER_DEX, Unit.MAGNITUDE);
+        requireUnit(SLOPE, member, Unit.MAGNITUDE_PER_DEX, Unit.MAGNITUDE);
         return like(definition.parameter(SLOPE, member));
     }
 
@@ -331,7 +343,7 @@ public final class PeriodLuminosity implements Rung<PeriodLuminosity> {
 
     private void requireMetallicity(Value coefficient) {
         definition.data().require("metallicity", Unit.DEX);
-        Requirements.unit(name(), METALLICITY, coefficient, Unit.MAGNITUDE_PER_DEX, Unit.MAGNITUDE);
+        requireUnit(METALLICITY, coefficient, Unit.MAGNITUDE_PER_DEX, Unit.MAGNITUDE);
     }
 
     /**
@@ -341,7 +353,7 @@ public final class PeriodLuminosity implements Rung<PeriodLuminosity> {
      * @return the rung
      */
     public PeriodLuminosity withCommonOffset(Source offset) {
-        Requirements.unit(name(), "common offset", offset, Unit.MAGNITUDE);
+        requireUnit("common offset", offset, Unit.MAGNITUDE);
         return with(common(offset), definition.parameter(COMMON + offset.name(), offset));
     }
 
@@ -352,7 +364,7 @@ public final class PeriodLuminosity implements Rung<PeriodLuminosity> {
      * @return the rung
      */
     public PeriodLuminosity withCommonOffset(SourceGroup.Member offset) {
-        Requirements.unit(name(), "common offset", offset, Unit.MAGNITUDE);
+        requireUnit("common offset", offset, Unit.MAGNITUDE);
         return with(common(offset), definition.parameter(COMMON + offset.name(), offset));
     }
 

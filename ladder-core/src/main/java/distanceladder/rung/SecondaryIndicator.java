@@ -11,6 +11,7 @@ import distanceladder.relation.Source;
 import distanceladder.relation.SourceGroup;
 import distanceladder.relation.Value;
 import distanceladder.text.NameFault;
+import distanceladder.text.ValueFault;
 import java.util.ArrayList;
 import java.util.List;
 
@@ -33,6 +34,7 @@ import java.util.List;
  */
 public final class SecondaryIndicator implements Rung<SecondaryIndicator> {
     private static final String ZERO_POINT = "zero point";
+    private static final String APART = "offset";
 
     private final Definition definition;
     private final Terms terms;
@@ -72,7 +74,9 @@ public final class SecondaryIndicator implements Rung<SecondaryIndicator> {
      */
     public static SecondaryIndicator of(String name, Observations data) {
         data.require("magnitude", Unit.MAGNITUDE);
-        Requirements.offsets(data);
+        if (data.has(APART)) {
+            data.require(APART, Unit.MAGNITUDE);
+        }
         Definition definition = Definition.of(name, data, "magnitude", Equated.of((mu, at) -> mu))
                 .withNoise(Noise.of(data.errors("magnitude error", Unit.MAGNITUDE)))
                 .parameter(ZERO_POINT, Source.free(name + " zero point", Unit.MAGNITUDE));
@@ -106,10 +110,7 @@ public final class SecondaryIndicator implements Rung<SecondaryIndicator> {
                 + String.join("", all.offsets.stream().map(z -> " + " + z).toList());
         return new SecondaryIndicator(
                 definition
-                        .withRelation(
-                                Requirements.offsets(definition.data())
-                                        ? relation.withOffsets(Requirements.OFFSETS)
-                                        : relation)
+                        .withRelation(definition.data().has(APART) ? relation.withOffsets(APART) : relation)
                         .described(words),
                 terms);
     }
@@ -180,7 +181,7 @@ public final class SecondaryIndicator implements Rung<SecondaryIndicator> {
     }
 
     private SecondaryIndicator shifted(Value offset, Definition changed) {
-        Requirements.unit(name(), "common offset", offset, Unit.MAGNITUDE);
+        requireMagnitude("common offset", offset);
         Terms more =
                 new Terms(terms.covariates, terms.uncertain, terms.covariances, plus(terms.offsets, offset.name()));
         return new SecondaryIndicator(changed, more).related();
@@ -240,6 +241,17 @@ public final class SecondaryIndicator implements Rung<SecondaryIndicator> {
         return new SecondaryIndicator(definition, more).related();
     }
 
+    private void requireMagnitude(String role, Value parameter) {
+        if (!parameter.unit().dimension().equals(Unit.MAGNITUDE.dimension())) {
+            throw new ValueFault(
+                    role + " \"" + parameter.name() + "\" in "
+                            + parameter.unit().symbol(),
+                    "the " + role + " is in " + Unit.MAGNITUDE.symbol(),
+                    "rung \"" + name() + "\"",
+                    "give a source in magnitudes");
+        }
+    }
+
     private static List<String> plus(List<String> list, String more) {
         if (list.contains(more)) {
             return list;
@@ -256,7 +268,7 @@ public final class SecondaryIndicator implements Rung<SecondaryIndicator> {
      * @return the rung
      */
     public SecondaryIndicator withZeroPoint(Source source) {
-        Requirements.unit(name(), ZERO_POINT, source, Unit.MAGNITUDE);
+        requireMagnitude(ZERO_POINT, source);
         return like(definition.parameter(ZERO_POINT, source));
     }
 
@@ -267,7 +279,7 @@ public final class SecondaryIndicator implements Rung<SecondaryIndicator> {
      * @return the rung
      */
     public SecondaryIndicator withZeroPoint(SourceGroup.Member member) {
-        Requirements.unit(name(), ZERO_POINT, member, Unit.MAGNITUDE);
+        requireMagnitude(ZERO_POINT, member);
         return like(definition.parameter(ZERO_POINT, member));
     }
 

@@ -3,6 +3,7 @@ package distanceladder.rung;
 import distanceladder.astro.Cosmography;
 import distanceladder.astro.Frame;
 import distanceladder.astro.Unit;
+import distanceladder.covariance.Diagonal;
 import distanceladder.relation.Amount;
 import distanceladder.relation.Datum;
 import distanceladder.relation.Definition;
@@ -48,11 +49,12 @@ import java.util.Optional;
  */
 public final class VelocityDistance implements Rung<VelocityDistance> {
     private static final double TYPICAL = 70;
+    private static final double SLOWEST = 10;
 
     private final Definition definition;
-    private final FlowForm form;
+    private final VelocityDistanceForm form;
 
-    private VelocityDistance(Definition definition, FlowForm form) {
+    private VelocityDistance(Definition definition, VelocityDistanceForm form) {
         this.definition = definition;
         this.form = form;
     }
@@ -65,14 +67,17 @@ public final class VelocityDistance implements Rung<VelocityDistance> {
      * @return the rung
      */
     public static VelocityDistance of(String name, Observations data) {
-        Observations full = data.has(FlowForm.VELOCITY) ? data : withVelocity(data);
-        full.require(FlowForm.VELOCITY, Unit.KILOMETRE_PER_SECOND);
-        double[] errors = full.errors(FlowForm.ERROR, Unit.KILOMETRE_PER_SECOND);
+        Observations full = data.has(VelocityDistanceForm.VELOCITY) ? data : withVelocity(data);
+        full.require(VelocityDistanceForm.VELOCITY, Unit.KILOMETRE_PER_SECOND);
+        if (full.has(VelocityDistanceForm.APART)) {
+            full.require(VelocityDistanceForm.APART, Unit.MAGNITUDE);
+        }
+        double[] errors = full.errors(VelocityDistanceForm.ERROR, Unit.KILOMETRE_PER_SECOND);
         Source eta = Source.free(name + " 5 log H0", Unit.MAGNITUDE).starting(5 * StrictMath.log10(TYPICAL));
-        Definition bare = Definition.of(name, full, FlowForm.VELOCITY, Equated.of((mu, at) -> mu))
+        Definition bare = Definition.of(name, full, VelocityDistanceForm.VELOCITY, Equated.of((mu, at) -> mu))
                 .withNoise(Noise.of(errors))
-                .parameter(FlowForm.ETA, eta);
-        return new VelocityDistance(bare, FlowForm.PLAIN).with(FlowForm.PLAIN);
+                .parameter(VelocityDistanceForm.ETA, eta);
+        return new VelocityDistance(bare, VelocityDistanceForm.PLAIN).with(VelocityDistanceForm.PLAIN);
     }
 
     private static Observations withVelocity(Observations data) {
@@ -83,19 +88,20 @@ public final class VelocityDistance implements Rung<VelocityDistance> {
             z[i] *= Cosmography.LIGHT_KM_PER_S;
             errors[i] *= Cosmography.LIGHT_KM_PER_S;
         }
-        return data.with(FlowForm.VELOCITY, Unit.KILOMETRE_PER_SECOND, z)
-                .with(FlowForm.ERROR, Unit.KILOMETRE_PER_SECOND, errors);
+        return data.with(VelocityDistanceForm.VELOCITY, Unit.KILOMETRE_PER_SECOND, z)
+                .with(VelocityDistanceForm.ERROR, Unit.KILOMETRE_PER_SECOND, errors);
     }
 
     /** The rung in another form; its columns are computed from the velocities each time. */
-    private VelocityDistance with(FlowForm next) {
+    private VelocityDistance with(VelocityDistanceForm next) {
         Observations data = definition.data();
         double[] f = next.factors(data);
-        Observations full = data.with(FlowForm.FACTOR, Unit.NONE, f);
+        Observations full = data.with(VelocityDistanceForm.FACTOR, Unit.NONE, f);
         if (next.magnitudes()) {
-            full = full.with(FlowForm.MODULUS, Unit.MAGNITUDE, next.moduli(data, f));
+            full = full.with(VelocityDistanceForm.MODULUS, Unit.MAGNITUDE, next.moduli(data, f));
         }
-        Definition fresh = Definition.of(name(), full, next.observable(), relation(next, Requirements.offsets(data)))
+        Definition fresh = Definition.of(
+                        name(), full, next.observable(), relation(next, data.has(VelocityDistanceForm.APART)))
                 .restingOn(definition.restsOn())
                 .withCalibrators(definition.calibrators())
                 .withNoise(noise(next))
@@ -103,10 +109,10 @@ public final class VelocityDistance implements Rung<VelocityDistance> {
         return new VelocityDistance(withParameters(fresh, next), next);
     }
 
-    private Definition withParameters(Definition fresh, FlowForm next) {
+    private Definition withParameters(Definition fresh, VelocityDistanceForm next) {
         Definition out = fresh;
         for (String role : definition.parameters().keySet()) {
-            if (!next.varied() && (role.equals(FlowForm.Q0) || role.equals(FlowForm.J0))) {
+            if (!next.varied() && (role.equals(VelocityDistanceForm.Q0) || role.equals(VelocityDistanceForm.J0))) {
                 continue;
             }
             out = definition.value(role) instanceof SourceGroup.Member member
@@ -116,27 +122,27 @@ public final class VelocityDistance implements Rung<VelocityDistance> {
         return withEta(out);
     }
 
-    private static Equated relation(FlowForm form, boolean apart) {
+    private static Equated relation(VelocityDistanceForm form, boolean apart) {
         Equated relation = form.magnitudes()
                 ? Equated.of(form::modulus)
                 : Equated.of(form::velocity)
-                        .startingAt(d -> start(d) - (apart ? d.column(Requirements.OFFSETS) : 0))
+                        .startingAt(d -> start(d) - (apart ? d.column(VelocityDistanceForm.APART) : 0))
                         .refusing(d -> refusal(d.observed()));
-        return apart ? relation.withOffsets(Requirements.OFFSETS) : relation;
+        return apart ? relation.withOffsets(VelocityDistanceForm.APART) : relation;
     }
 
-    /** Noise of unknown size has no sigma yet; the column's error then keeps one that approaches from infinity. */
     private static double start(Datum d) {
-        double sigma = d.sigma() > 0 ? d.sigma() : d.column(FlowForm.ERROR);
-        return 5 * StrictMath.log10(Math.max(d.observed(), sigma) / TYPICAL) + 25;
+        return 5 * StrictMath.log10(Math.max(Math.max(d.observed(), d.sigma()), SLOWEST) / TYPICAL) + 25;
     }
 
     /** The columns' errors in another form; noise that the user gave is kept, or refused where it cannot be. */
-    private Noise noise(FlowForm next) {
+    private Noise noise(VelocityDistanceForm next) {
         Noise now = definition.noise();
-        boolean columns = ColumnNoise.is(now, form.sigmas(definition.data()));
+        boolean columns = form.isNoise(now, definition.data());
+        boolean none = now.covariance()
+                .equals(Diagonal.fromVariances(new double[definition.data().size()]));
         boolean rescaled = next.magnitudes() != form.magnitudes();
-        boolean sized = ColumnNoise.hasMore(now) || !(columns || ColumnNoise.isNone(now));
+        boolean sized = now.scatter() > 0 || now.joint().isPresent() || !(columns || none);
         if ((rescaled && sized) || (next.peculiar() != form.peculiar() && !columns)) {
             throw new ValueFault(
                     rescaled ? "noise or scatter in " + Unit.KILOMETRE_PER_SECOND.symbol() : "noise of its own",
@@ -148,11 +154,22 @@ public final class VelocityDistance implements Rung<VelocityDistance> {
                             ? "call inMagnitudes first, and give noise and scatter in mag"
                             : "call withPeculiarVelocity first, or give noise that holds it");
         }
-        return columns ? ColumnNoise.replaced(now, next.sigmas(definition.data())) : now;
+        return columns ? now.withCovariance(Diagonal.fromStandardDeviations(next.sigmas(definition.data()))) : now;
+    }
+
+    private void requireUnit(String role, Value parameter, Unit wanted) {
+        if (!parameter.unit().dimension().equals(wanted.dimension())) {
+            throw new ValueFault(
+                    role + " \"" + parameter.name() + "\" in "
+                            + parameter.unit().symbol(),
+                    "the " + role + " is a " + wanted.dimension(),
+                    "rung \"" + name() + "\"",
+                    "give a source in such a unit");
+        }
     }
 
     private static Definition withEta(Definition definition) {
-        return definition.highlighting(List.of(hubble(definition.value(FlowForm.ETA))));
+        return definition.highlighting(List.of(hubble(definition.value(VelocityDistanceForm.ETA))));
     }
 
     private static Derived hubble(Value eta) {
@@ -189,9 +206,9 @@ public final class VelocityDistance implements Rung<VelocityDistance> {
      * @return the rung
      */
     public VelocityDistance withExpansion(Source q0, Source j0) {
-        Requirements.unit(name(), FlowForm.Q0, q0, Unit.NONE);
-        Requirements.unit(name(), FlowForm.J0, j0, Unit.NONE);
-        Definition d = definition.parameter(FlowForm.Q0, q0).parameter(FlowForm.J0, j0);
+        requireUnit(VelocityDistanceForm.Q0, q0, Unit.NONE);
+        requireUnit(VelocityDistanceForm.J0, j0, Unit.NONE);
+        Definition d = definition.parameter(VelocityDistanceForm.Q0, q0).parameter(VelocityDistanceForm.J0, j0);
         return new VelocityDistance(d, form).with(form.expanding(q0.mean()[0], j0.mean()[0], true, true));
     }
 
@@ -235,7 +252,7 @@ public final class VelocityDistance implements Rung<VelocityDistance> {
     }
 
     private VelocityDistance withFlow(String role, Source source, double[] column) {
-        Requirements.unit(name(), role, source, Unit.KILOMETRE_PER_SECOND);
+        requireUnit(role, source, Unit.KILOMETRE_PER_SECOND);
         Definition d = definition
                 .withData(definition.data().with(role, Unit.NONE, column), definition.noise())
                 .parameter(role, source);
@@ -316,8 +333,8 @@ public final class VelocityDistance implements Rung<VelocityDistance> {
      * @return the rung
      */
     public VelocityDistance withLogHubbleConstant(Source source) {
-        Requirements.unit(name(), FlowForm.ETA, source, Unit.MAGNITUDE);
-        return like(withEta(definition.parameter(FlowForm.ETA, source)));
+        requireUnit(VelocityDistanceForm.ETA, source, Unit.MAGNITUDE);
+        return like(withEta(definition.parameter(VelocityDistanceForm.ETA, source)));
     }
 
     /**
@@ -327,8 +344,8 @@ public final class VelocityDistance implements Rung<VelocityDistance> {
      * @return the rung
      */
     public VelocityDistance withLogHubbleConstant(SourceGroup.Member member) {
-        Requirements.unit(name(), FlowForm.ETA, member, Unit.MAGNITUDE);
-        return like(withEta(definition.parameter(FlowForm.ETA, member)));
+        requireUnit(VelocityDistanceForm.ETA, member, Unit.MAGNITUDE);
+        return like(withEta(definition.parameter(VelocityDistanceForm.ETA, member)));
     }
 
     /**
@@ -346,7 +363,7 @@ public final class VelocityDistance implements Rung<VelocityDistance> {
      * @return handle of the unknown itself, mag
      */
     public Value logHubbleConstant() {
-        return definition.value(FlowForm.ETA);
+        return definition.value(VelocityDistanceForm.ETA);
     }
 
     @Override

@@ -20,8 +20,8 @@
  * Derived hubble = flow.hubbleConstant();
  * }</pre>
  *
- * <p>What does not belong here: solving, which is the ladder's; files; and anything that two families would share beyond
- * the checks of a table. No family knows another. A new kind of rung is one class that implements {@link
+ * <p>What does not belong here: solving, which is the ladder's; files; and what several families share, which belongs in the
+ * floors beneath. No family knows another. A new kind of rung is one class that implements {@link
  * distanceladder.relation.Rung}, in any package.
  */
 @NullMarked

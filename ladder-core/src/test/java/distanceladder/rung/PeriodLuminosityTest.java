@@ -162,7 +162,7 @@ class PeriodLuminosityTest {
         Source length = Source.free("length", Unit.MEGAPARSEC);
         assertThrows(ValueFault.class, () -> rung.withZeroPoint(length));
         ValueFault slope = assertThrows(ValueFault.class, () -> rung.withSlope(length));
-        assertEquals("the slope is in mag/dex or mag", slope.rule());
+        assertEquals("the slope is a magnitude per decade or a magnitude", slope.rule());
         assertThrows(ValueFault.class, () -> rung.withMetallicity(length));
         assertThrows(ValueFault.class, () -> rung.withCommonOffset(length));
         assertThrows(ValueFault.class, () -> rung.withPivot(Double.NaN));

@@ -243,9 +243,8 @@ class VelocityDistanceTest {
         Points at = d.relation().start(d);
         assertEquals(5 * StrictMath.log10(20.0 / 70) + 25, at.modulus(0), 1e-12);
         assertEquals(9.225490200071284, at.parameter(0), 1e-12); // 5 log10 70
-        assertEquals(
-                at.modulus(0),
-                d.relation().start(local.withEqualUnknownErrors().definition()).modulus(0));
+        Points unknown = d.relation().start(local.withEqualUnknownErrors().definition());
+        assertEquals(5 * StrictMath.log10(10.0 / 70) + 25, unknown.modulus(0), 1e-12); // at 10 km/s
         assertTrue(d.relation().refusal(d, 1, at).isEmpty());
         String reason = d.relation().refusal(d, 0, at).orElseThrow();
         assertTrue(reason.contains("approaches us at 220.0 km/s"), reason);
@@ -332,6 +331,7 @@ class VelocityDistanceTest {
 
     @Test
     void whatDoesNotFitIsRefused() {
+        assertThrows(ValueFault.class, () -> VelocityDistance.of("flow", GALAXIES.with("offset", Unit.DEX, 0, 0, 0)));
         assertThrows(NameFault.class, () -> VelocityDistance.of("flow", GALAXIES.renamed("velocity error", "error")));
         assertThrows(NameFault.class, () -> VelocityDistance.of("flow", GALAXIES.renamed("velocity", "cz")));
         assertThrows(

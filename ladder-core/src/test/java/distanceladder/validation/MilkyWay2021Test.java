@@ -132,7 +132,7 @@ class MilkyWay2021Test {
             .calibratedBy(parallaxes);
     private final Solution solution = Ladder.of(pulsators).solve();
 
-    private static Observations unflagged() {
+    static Observations unflagged() {
         List<Integer> kept = new ArrayList<>();
         for (int i = 0; i < TABLE.size(); i++) {
             if (!List.of("f", "g").contains(TABLE.names(1).get(i))) {

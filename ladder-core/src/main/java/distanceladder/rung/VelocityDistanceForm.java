@@ -2,7 +2,9 @@ package distanceladder.rung;
 
 import distanceladder.astro.Cosmography;
 import distanceladder.astro.Distances;
+import distanceladder.covariance.Diagonal;
 import distanceladder.relation.Dual;
+import distanceladder.relation.Noise;
 import distanceladder.relation.Observations;
 import distanceladder.relation.Terms;
 import distanceladder.text.Figures;
@@ -14,7 +16,7 @@ import java.util.List;
  * How a velocity-distance rung is set up, and its equations; a flow is a column whose parameter of the same name adds to
  * the velocity.
  */
-record FlowForm(
+record VelocityDistanceForm(
         double q0,
         double j0,
         boolean expansion,
@@ -25,11 +27,12 @@ record FlowForm(
     static final String ETA = "log Hubble constant";
     static final String Q0 = "deceleration parameter";
     static final String J0 = "jerk parameter";
+    static final String APART = "offset";
     static final String VELOCITY = "velocity";
     static final String ERROR = "velocity error";
     static final String FACTOR = "expansion factor";
     static final String MODULUS = "expansion modulus";
-    static final FlowForm PLAIN = new FlowForm(-0.55, 1, true, false, 0, false, List.of());
+    static final VelocityDistanceForm PLAIN = new VelocityDistanceForm(-0.55, 1, true, false, 0, false, List.of());
 
     String observable() {
         return magnitudes ? MODULUS : VELOCITY;
@@ -99,24 +102,24 @@ record FlowForm(
         return y;
     }
 
-    FlowForm expanding(double q, double j, boolean terms, boolean sources) {
-        return new FlowForm(q, j, terms, sources, peculiar, magnitudes, flows);
+    VelocityDistanceForm expanding(double q, double j, boolean terms, boolean sources) {
+        return new VelocityDistanceForm(q, j, terms, sources, peculiar, magnitudes, flows);
     }
 
-    FlowForm scattered(double sigma) {
-        return new FlowForm(q0, j0, expansion, varied, sigma, magnitudes, flows);
+    VelocityDistanceForm scattered(double sigma) {
+        return new VelocityDistanceForm(q0, j0, expansion, varied, sigma, magnitudes, flows);
     }
 
-    FlowForm inMagnitudes() {
-        return new FlowForm(q0, j0, expansion, varied, peculiar, true, flows);
+    VelocityDistanceForm inMagnitudes() {
+        return new VelocityDistanceForm(q0, j0, expansion, varied, peculiar, true, flows);
     }
 
-    FlowForm with(String flow) {
+    VelocityDistanceForm with(String flow) {
         List<String> more = new ArrayList<>(flows);
         if (!more.contains(flow)) {
             more.add(flow);
         }
-        return new FlowForm(q0, j0, expansion, varied, peculiar, magnitudes, List.copyOf(more));
+        return new VelocityDistanceForm(q0, j0, expansion, varied, peculiar, magnitudes, List.copyOf(more));
     }
 
     /** The expansion factor of a datum: its column, or with the sources of q0 and j0. */
@@ -131,9 +134,15 @@ record FlowForm(
         return q.negate().add(1).multiply(0.5 * z).add(1).subtract(second.multiply(z * z / 6));
     }
 
+    /** Whether the known errors are just those of the columns, to the bit: else the user put others in their place. */
+    boolean isNoise(Noise noise, Observations data) {
+        return noise.mode() != Noise.Scatter.EXACT
+                && noise.covariance().equals(Diagonal.fromStandardDeviations(sigmas(data)));
+    }
+
     private static ValueFault fault(Observations data, int datum, String rule, String repair) {
         return new ValueFault(
-                "velocity = " + Figures.significant(data.column(VELOCITY)[datum], 6) + " km/s",
+                "velocity = " + data.column(VELOCITY)[datum] + " km/s",
                 rule,
                 data.label() + ", datum \"" + data.names().get(datum) + "\"",
                 repair);

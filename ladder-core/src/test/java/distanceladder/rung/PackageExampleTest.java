@@ -5,59 +5,18 @@ import static distanceladder.relation.Amount.modulus;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
-import com.tngtech.archunit.core.domain.JavaClass;
-import com.tngtech.archunit.core.domain.JavaClasses;
-import com.tngtech.archunit.core.importer.ClassFileImporter;
-import com.tngtech.archunit.core.importer.ImportOption;
 import distanceladder.astro.Unit;
 import distanceladder.relation.Derived;
 import distanceladder.relation.Observations;
-import distanceladder.relation.Rung;
 import distanceladder.relation.Source;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
-import java.util.List;
 import java.util.stream.Collectors;
 import org.junit.jupiter.api.Test;
 
-/** What holds for the families as a whole. */
-class FamiliesTest {
-    private static final JavaClasses FLOOR = new ClassFileImporter()
-            .withImportOption(new ImportOption.DoNotIncludeTests())
-            .importPackages("distanceladder.rung");
-
-    @Test
-    void noFamilyKnowsAnother() {
-        List<JavaClass> families =
-                FLOOR.stream().filter(c -> c.isAssignableTo(Rung.class)).toList();
-        assertEquals(7, families.size());
-        for (JavaClass family : families) {
-            List<String> others = family.getDirectDependenciesFromSelf().stream()
-                    .map(d -> d.getTargetClass())
-                    .filter(c -> c != family && families.contains(c))
-                    .map(JavaClass::getName)
-                    .distinct()
-                    .toList();
-            assertEquals(List.of(), others, family.getName());
-        }
-    }
-
-    @Test
-    void theFloorKnowsOnlyWhatIsBeneathIt() {
-        List<String> allowed = List.of("rung", "relation", "covariance", "astro", "text");
-        for (JavaClass c : FLOOR) {
-            List<String> above = c.getDirectDependenciesFromSelf().stream()
-                    .map(d -> d.getTargetClass().getPackageName())
-                    .filter(p -> p.startsWith("distanceladder."))
-                    .map(p -> p.substring("distanceladder.".length()))
-                    .filter(p -> !allowed.contains(p))
-                    .distinct()
-                    .toList();
-            assertEquals(List.of(), above, c.getName());
-        }
-    }
-
+/** The example of the package is compiled and run. */
+class PackageExampleTest {
     /** The lines between the marks are those of package-info. */
     @Test
     void theExampleOfThePackageRuns() throws IOException {
@@ -82,7 +41,7 @@ class FamiliesTest {
         // end
         assertEquals("Hubble constant", hubble.name());
         assertTrue(flow.text().contains("rests on pulsators"), flow.text());
-        String test = Files.readString(Path.of("src/test/java/distanceladder/rung/FamiliesTest.java"));
+        String test = Files.readString(Path.of("src/test/java/distanceladder/rung/PackageExampleTest.java"));
         String shown = Files.readString(Path.of("src/main/java/distanceladder/rung/package-info.java"));
         assertEquals(block(test, "// example", "// end"), block(shown, "<pre>{@code", "}</pre>"));
     }
