@@ -1,28 +1,36 @@
 package distanceladder.rung;
 
 import distanceladder.astro.Unit;
+import distanceladder.covariance.Diagonal;
 import distanceladder.relation.Amount;
 import distanceladder.relation.Definition;
+import distanceladder.relation.Distance;
 import distanceladder.relation.Dual;
 import distanceladder.relation.Equated;
 import distanceladder.relation.Noise;
 import distanceladder.relation.Observations;
 import distanceladder.relation.Rung;
 import distanceladder.relation.Source;
+import distanceladder.relation.SourceGroup;
+import distanceladder.relation.Terms;
 import distanceladder.relation.Value;
+import distanceladder.text.Figures;
 import distanceladder.text.ValueFault;
+import java.util.Optional;
 
 /**
  * A geometric distance of one object, with a statistical and a systematic part.
  *
  * <pre>mu + s = given   or   10^((mu - 25) / 5) + s = given [Mpc]   or   10^((10 - mu) / 5) + s = given [mas]</pre>
  *
- * as the distance was measured: a distance keeps its scale. The standard deviation of the given amount is its own,
- * statistical error; the systematic part s has mean 0 and is a source, which other rungs share when they are handed the
- * same.
+ * as the distance was measured, mu in mag: a distance keeps its scale, and errors are normal in it. The standard
+ * deviation of the given amount is its own, statistical error; the systematic part s (observed minus true) is a source,
+ * which other rungs share when they are handed the same. A modulus is linear; distance and parallax are first order, good
+ * while the error is small against the value. A parallax of zero or less is legal, and alone gives no modulus.
  */
 public final class Anchor implements Rung<Anchor> {
     private static final String SYSTEMATIC = "systematic";
+    private static final String GIVEN = "distance";
 
     private final Definition definition;
     private final String object;
@@ -62,11 +70,27 @@ public final class Anchor implements Rung<Anchor> {
                     "anchor \"" + name + "\"",
                     "give amount.plusMinus(error)");
         }
-        Observations data = Observations.of(name, name).bearingOn(object).with("distance", given.unit(), given.value());
-        Definition definition = Definition.of(name, data, "distance", relation(given.unit(), false, name))
+        Equated relation = relation(given.unit(), false, name);
+        requireDistance(name, given);
+        Observations data = Observations.of(name, name).bearingOn(object).with(GIVEN, given.unit(), given.value());
+        Definition definition = Definition.of(name, data, GIVEN, relation)
                 .described(words(given.unit()) + " = given")
-                .withNoise(Noise.of(Math.abs(given.unit().toBase(given.sigma()))));
+                .withNoise(Noise.of(sigma(given)));
         return new Anchor(definition, object, given);
+    }
+
+    private static double sigma(Amount given) {
+        return Math.abs(given.unit().toBase(given.sigma()));
+    }
+
+    private static void requireDistance(String name, Amount given) {
+        if (given.unit().dimension().equals(Unit.MEGAPARSEC.dimension()) && !(given.value() > 0)) {
+            throw new ValueFault(
+                    "distance = " + given.text(),
+                    "a distance is above zero",
+                    "anchor \"" + name + "\"",
+                    "give the distance, or its modulus in mag");
+        }
     }
 
     private static String words(Unit unit) {
@@ -85,7 +109,8 @@ public final class Anchor implements Rung<Anchor> {
                         .startingAt(d -> 25 + 5 * StrictMath.log10(Math.max(d.observed(), d.sigma())));
             case "parallax" ->
                 Equated.of((mu, at) -> shifted(mu.negate().add(10).divide(5).tenTo(), at, systematic))
-                        .startingAt(d -> 10 - 5 * StrictMath.log10(Math.max(d.observed(), d.sigma())));
+                        .startingAt(d -> 10 - 5 * StrictMath.log10(Math.max(d.observed(), d.sigma())))
+                        .refusing(d -> refusal(d.observed() - (systematic ? d.parameter(SYSTEMATIC) : 0)));
             default ->
                 throw new ValueFault(
                         "unit " + unit.symbol(),
@@ -95,20 +120,35 @@ public final class Anchor implements Rung<Anchor> {
         };
     }
 
-    private static Dual shifted(Dual predicted, distanceladder.relation.Terms at, boolean systematic) {
+    private static Optional<String> refusal(double corrected) {
+        return corrected > 0
+                ? Optional.empty()
+                : Optional.of("its parallax is " + Figures.significant(corrected, 3)
+                        + " mas, and no distance has a parallax of zero or less");
+    }
+
+    private static Dual shifted(Dual predicted, Terms at, boolean systematic) {
         return systematic ? predicted.add(at.parameter(SYSTEMATIC)) : predicted;
     }
 
     /**
      * The same anchor with a systematic error.
      *
-     * @param error standard deviation in the dimension in which the anchor is given
-     * @return the rung, with a source named "{@code rung} systematic"
+     * @param error its size in the dimension in which the anchor is given: {@code modulus(0.03)}, or {@code
+     *     modulus(0).plusMinus(0.03)}
+     * @return the rung, with a source named "{@code rung} systematic" of mean 0
      */
     public Anchor withSystematic(Amount error) {
         Amount in = error.in(given.unit());
+        if (in.sigma() > 0 && in.value() != 0) {
+            throw new ValueFault(
+                    "systematic error = " + in.text(),
+                    "a systematic error has mean 0",
+                    "anchor \"" + name() + "\"",
+                    "give its standard deviation alone, or a source with the mean that you want");
+        }
         double sigma = in.sigma() > 0 ? in.sigma() : Math.abs(in.value());
-        return withSystematic(Source.normal(definition.name() + " systematic", new Amount(0, sigma, given.unit())));
+        return withSystematic(Source.normal(name() + " systematic", new Amount(0, sigma, given.unit())));
     }
 
     /**
@@ -118,13 +158,42 @@ public final class Anchor implements Rung<Anchor> {
      * @return the rung
      */
     public Anchor withSystematic(Source source) {
-        source.unit().convert(0, given.unit());
-        return like(
-                definition.parameter(SYSTEMATIC, source).withRelation(relation(given.unit(), true, definition.name())));
+        return systematic(source, definition.parameter(SYSTEMATIC, source));
     }
 
     /**
-     * The same anchor at another value, with its systematic part as it was.
+     * The same anchor with a systematic error that is correlated with others.
+     *
+     * @param member observed minus true, in the dimension in which the anchor is given, as a member of a group
+     * @return the rung
+     */
+    public Anchor withSystematic(SourceGroup.Member member) {
+        return systematic(member, definition.parameter(SYSTEMATIC, member));
+    }
+
+    private Anchor systematic(Value part, Definition changed) {
+        if (!part.unit().dimension().equals(given.unit().dimension())) {
+            throw new ValueFault(
+                    "systematic part \"" + part.name() + "\" in " + part.unit().symbol(),
+                    "the systematic part is in a unit of what is given",
+                    "anchor \"" + name() + "\"",
+                    "give it in " + given.unit().symbol());
+        }
+        return like(changed.withRelation(relation(given.unit(), true, name()))
+                .described(words(given.unit()) + " + s = given"));
+    }
+
+    /**
+     * The systematic part.
+     *
+     * @return its handle
+     */
+    public Value systematic() {
+        return definition.value(SYSTEMATIC);
+    }
+
+    /**
+     * The same anchor at another value, all else as it was.
      *
      * @param other the new amount; without a standard deviation the old one stays
      * @return the rung under the same name
@@ -132,10 +201,25 @@ public final class Anchor implements Rung<Anchor> {
     public Anchor at(Amount other) {
         Amount in = other.in(given.unit());
         Amount full = in.sigma() > 0 ? in : in.plusMinus(given.sigma());
-        Anchor fresh = named(definition.name(), object, full);
-        return definition.input(SYSTEMATIC).isPresent()
-                ? fresh.withSystematic((Source) definition.value(SYSTEMATIC))
-                : fresh;
+        requireDistance(name(), full);
+        Observations data = definition.data().with(GIVEN, full.unit(), full.value());
+        return new Anchor(definition.withData(data, noise(full)), object, full);
+    }
+
+    private Noise noise(Amount other) {
+        Noise now = definition.noise();
+        if (sigma(other) == sigma(given)) {
+            return now;
+        }
+        if (now.mode() == Noise.Scatter.EXACT
+                || !now.covariance().equals(Diagonal.fromStandardDeviations(sigma(given)))) {
+            throw new ValueFault(
+                    "standard deviation = " + other.sigma() + " " + other.unit().symbol(),
+                    "an anchor whose noise was replaced keeps that noise",
+                    "anchor \"" + name() + "\"",
+                    "give the value alone, and the new noise by withNoise");
+        }
+        return now.withCovariance(Diagonal.fromStandardDeviations(sigma(other)));
     }
 
     /**
@@ -143,7 +227,7 @@ public final class Anchor implements Rung<Anchor> {
      *
      * @return handle of its modulus
      */
-    public Value distance() {
+    public Distance distance() {
         return distance(object);
     }
 

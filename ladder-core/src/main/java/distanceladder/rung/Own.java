@@ -7,6 +7,7 @@ import distanceladder.relation.Noise;
 import distanceladder.relation.Observations;
 import distanceladder.relation.Rung;
 import distanceladder.relation.Source;
+import distanceladder.relation.SourceGroup;
 import distanceladder.relation.Value;
 
 /**
@@ -70,6 +71,17 @@ public final class Own implements Rung<Own> {
      */
     public Own withParameter(String role, Source source) {
         return new Own(definition.parameter(role, source));
+    }
+
+    /**
+     * The same rung with a member of a group for a parameter.
+     *
+     * @param role the role by which the equation reads it
+     * @param member one number of a group of sources
+     * @return the rung
+     */
+    public Own withParameter(String role, SourceGroup.Member member) {
+        return new Own(definition.parameter(role, member));
     }
 
     /**

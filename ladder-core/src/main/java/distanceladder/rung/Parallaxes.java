@@ -1,6 +1,7 @@
 package distanceladder.rung;
 
 import distanceladder.astro.AngularKernel;
+import distanceladder.astro.Distances;
 import distanceladder.astro.Sky;
 import distanceladder.astro.Unit;
 import distanceladder.covariance.Dense;
@@ -35,10 +36,12 @@ import java.util.Optional;
  * has no modulus when that parallax, less the offset, is not above zero. The errors are normal in the parallax; those
  * of moduli are first order and need a parallax of some significance, or a second datum.
  *
- * <p>Columns: {@code parallax}, {@code parallax error}.
+ * <p>Columns: {@code parallax}, {@code parallax error}; {@code offset} (modulus of the star less that of its object,
+ * mag) when present. The catalogue's zp is no column: it is the source given to {@link #withOffset(Source)}.
  */
 public final class Parallaxes implements Rung<Parallaxes> {
     private static final String OFFSET = "offset";
+    private static final String APART = "offset";
     private static final double SMALLEST = 1e-3;
 
     private final Definition definition;
@@ -58,6 +61,9 @@ public final class Parallaxes implements Rung<Parallaxes> {
      */
     public static Parallaxes of(String name, Observations data) {
         data.require("parallax", Unit.MILLIARCSECOND);
+        if (data.has(APART)) {
+            data.require(APART, Unit.MAGNITUDE);
+        }
         double[] errors = data.errors("parallax error", Unit.MILLIARCSECOND);
         Definition definition = Definition.of(name, data, "parallax", Equated.of((mu, at) -> mu))
                 .withNoise(Noise.of(errors))
@@ -67,6 +73,7 @@ public final class Parallaxes implements Rung<Parallaxes> {
 
     private Parallaxes related() {
         List<String> linear = columns;
+        boolean apart = definition.data().has(APART);
         Equated relation = Equated.of((modulus, at) -> {
                     Dual p = modulus.negate().add(10).divide(5).tenTo().add(at.parameter(OFFSET));
                     for (String x : linear) {
@@ -74,13 +81,29 @@ public final class Parallaxes implements Rung<Parallaxes> {
                     }
                     return p;
                 })
-                .startingAt(d -> 10 - 5 * StrictMath.log10(Math.max(Math.max(d.observed(), d.sigma()), SMALLEST)))
+                .startingAt(d -> start(d) - (apart ? d.column(APART) : 0))
                 .refusing(d -> refusal(corrected(d, linear)));
         String words = "p = 10^((10 - mu)/5) + offset"
                 + String.join(
                         "", columns.stream().map(x -> " + k(" + x + ") " + x).toList())
                 + ", offset observed minus true";
-        return new Parallaxes(definition.withRelation(relation).described(words), columns);
+        Equated full = apart ? relation.withOffsets(APART) : relation;
+        return new Parallaxes(definition.withRelation(full).described(words), columns);
+    }
+
+    private static double start(Datum d) {
+        return Distances.modulusFromParallax(Math.max(Math.max(d.observed(), d.sigma()), SMALLEST));
+    }
+
+    private void requireParallax(String role, Value parameter) {
+        if (!parameter.unit().dimension().equals(Unit.MILLIARCSECOND.dimension())) {
+            throw new ValueFault(
+                    role + " \"" + parameter.name() + "\" in "
+                            + parameter.unit().symbol(),
+                    "the " + role + " is in " + Unit.MILLIARCSECOND.symbol(),
+                    "rung \"" + name() + "\"",
+                    "give a source in a unit of parallax");
+        }
     }
 
     private static String term(String column) {
@@ -104,12 +127,28 @@ public final class Parallaxes implements Rung<Parallaxes> {
      * @return the rung
      */
     public Parallaxes withOffsetTerm(String column, Source coefficient) {
-        definition.data().column(column);
+        return termed(column, coefficient, definition.parameter(term(column), coefficient));
+    }
+
+    /**
+     * The same rung with an offset that is linear in a column, beside the constant one.
+     *
+     * @param column name of the column
+     * @param coefficient the offset for each unit of the column, a unit of parallax, as a member of a group
+     * @return the rung
+     */
+    public Parallaxes withOffsetTerm(String column, SourceGroup.Member coefficient) {
+        return termed(column, coefficient, definition.parameter(term(column), coefficient));
+    }
+
+    private Parallaxes termed(String column, Value coefficient, Definition changed) {
+        changed.data().unit(column);
+        requireParallax(term(column), coefficient);
         List<String> more = new ArrayList<>(columns);
         if (!more.contains(column)) {
             more.add(column);
         }
-        return new Parallaxes(definition.parameter(term(column), coefficient), List.copyOf(more)).related();
+        return new Parallaxes(changed, List.copyOf(more)).related();
     }
 
     /**
@@ -170,16 +209,18 @@ public final class Parallaxes implements Rung<Parallaxes> {
      * @return the rung
      */
     public Parallaxes withOffset(Source offset) {
+        requireParallax(OFFSET, offset);
         return like(definition.parameter(OFFSET, offset));
     }
 
     /**
      * The same rung with another offset.
      *
-     * @param offset a member of a group of sources
+     * @param offset observed minus true, in a unit of parallax, as a member of a group of sources
      * @return the rung
      */
     public Parallaxes withOffset(SourceGroup.Member offset) {
+        requireParallax(OFFSET, offset);
         return like(definition.parameter(OFFSET, offset));
     }
 

@@ -13,7 +13,10 @@ import distanceladder.relation.SourceGroup;
 import distanceladder.relation.Value;
 import distanceladder.text.ValueFault;
 import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.LinkedHashMap;
 import java.util.List;
+import java.util.Map;
 
 /**
  * A period-luminosity relation of pulsating stars.
@@ -23,7 +26,11 @@ import java.util.List;
  * with the apparent (Wesenheit) magnitude m, the modulus mu of the star or its galaxy, the absolute magnitude M of a star
  * at the pivot period, the slope b, the period P in days, and, when asked for, the metallicity x = [O/H] with its
  * coefficient g, and common offsets z_s of the photometry (Leavitt and Pickering 1912; Wesenheit magnitudes: Madore
- * 1982). Linear. Period and metallicity are taken as known exactly; a scatter is given by {@link Rung#withScatter}.
+ * 1982). Linear, so its first order is exact, but for a colour that is measured with an error ({@link #withColour}).
+ *
+ * <p>Period and metallicity are taken as known exactly: an error of a period is small against the scatter, that of a
+ * metallicity may not be. One slope holds for all periods and one mode of pulsation, unless {@link #withBreak} and {@link
+ * #withOvertones} say otherwise. A scatter is given by {@link Rung#withScatter}.
  *
  * <p>Columns: {@code magnitude}, {@code magnitude error}; {@code log period} or {@code period}; {@code metallicity} when
  * asked for; {@code offset} (modulus of the star less that of its galaxy, mag) when present.
@@ -35,6 +42,8 @@ public final class PeriodLuminosity implements Rung<PeriodLuminosity> {
     private static final String RATIO = "colour ratio";
     private static final String BREAK = "break";
     private static final String OVERTONE = "overtone offset";
+    private static final String COMMON = "common offset ";
+    private static final String APART = "offset";
 
     private final Definition definition;
     private final double pivot;
@@ -61,6 +70,9 @@ public final class PeriodLuminosity implements Rung<PeriodLuminosity> {
         double[] errors = data.errors("magnitude error", Unit.MAGNITUDE);
         Observations full = data.has("log period") ? data : withLogPeriod(data);
         full.require("log period", Unit.LOG_DAY);
+        if (full.has(APART)) {
+            full.require(APART, Unit.MAGNITUDE);
+        }
         Definition definition = Definition.of(name, full, "magnitude", Equated.of((mu, at) -> mu))
                 .withNoise(Noise.of(errors))
                 .parameter(ZERO_POINT, Source.free(name + " zero point", Unit.MAGNITUDE))
@@ -84,6 +96,49 @@ public final class PeriodLuminosity implements Rung<PeriodLuminosity> {
         return data.with("log period", Unit.LOG_DAY, periods);
     }
 
+    /**
+     * The Wesenheit magnitude of three bands, {@code W = m_a - R (m_b - m_c)}, free of reddening when R is the ratio of
+     * total absorption in band a to the reddening of colour b - c (Madore 1982).
+     *
+     * <p>Its variance is that of independent errors in the bands: {@code e_a^2 + R^2 (e_b^2 + e_c^2)} for three different
+     * bands; a band that stands twice enters once, with its whole coefficient ({@code (1 - R)^2 e_a^2 + R^2 e_c^2} for b =
+     * a).
+     *
+     * @param data columns of the bands, and for each band b its errors as {@code b error}
+     * @param ratio R, finite
+     * @param bands the names of the columns a, b and c, in this order; b and c differ
+     * @return the table with columns {@code magnitude} and {@code magnitude error}
+     */
+    public static Observations wesenheit(Observations data, double ratio, String... bands) {
+        if (bands.length != 3 || bands[1].equals(bands[2]) || !Double.isFinite(ratio)) {
+            throw new ValueFault(
+                    "bands " + List.of(bands) + ", ratio = " + ratio,
+                    "a Wesenheit magnitude is a - R (b - c) of bands a, b and c, its colour of two different ones",
+                    data.label(),
+                    "name three bands and a finite ratio");
+        }
+        Map<String, Double> coefficients = new LinkedHashMap<>();
+        coefficients.put(bands[0], 1.0);
+        coefficients.merge(bands[1], -ratio, Double::sum);
+        coefficients.merge(bands[2], ratio, Double::sum);
+        double[] magnitudes = new double[data.size()];
+        double[] variances = new double[data.size()];
+        coefficients.forEach((band, factor) -> {
+            data.require(band, Unit.MAGNITUDE);
+            double[] numbers = data.column(band);
+            double[] errors = data.errors(band + " error", Unit.MAGNITUDE);
+            for (int i = 0; i < numbers.length; i++) {
+                magnitudes[i] += factor * numbers[i];
+                variances[i] += factor * factor * errors[i] * errors[i];
+            }
+        });
+        return data.with("magnitude", Unit.MAGNITUDE, magnitudes)
+                .with(
+                        "magnitude error",
+                        Unit.MAGNITUDE,
+                        Arrays.stream(variances).map(Math::sqrt).toArray());
+    }
+
     private PeriodLuminosity related() {
         double reference = pivot;
         List<Term> more = terms;
@@ -104,7 +159,7 @@ public final class PeriodLuminosity implements Rung<PeriodLuminosity> {
                 + String.join("", terms.stream().map(t -> " + " + t.words).toList());
         return new PeriodLuminosity(
                 definition
-                        .withRelation(definition.data().has("offset") ? relation.withOffsets("offset") : relation)
+                        .withRelation(definition.data().has(APART) ? relation.withOffsets(APART) : relation)
                         .described(words),
                 pivot,
                 terms);
@@ -115,6 +170,32 @@ public final class PeriodLuminosity implements Rung<PeriodLuminosity> {
         more.removeIf(t -> t.role.equals(term.role));
         more.add(term);
         return new PeriodLuminosity(changed, pivot, List.copyOf(more)).related();
+    }
+
+    private void requireUnit(String role, Value parameter, Unit... wanted) {
+        List<String> dimensions = Arrays.stream(wanted).map(Unit::dimension).toList();
+        if (!dimensions.contains(parameter.unit().dimension())) {
+            throw new ValueFault(
+                    role + " \"" + parameter.name() + "\" in "
+                            + parameter.unit().symbol(),
+                    "the " + role + " is a " + String.join(" or a ", dimensions),
+                    "rung \"" + name() + "\"",
+                    "give a source in such a unit");
+        }
+    }
+
+    private void requireFinite(String what, double logPeriod) {
+        if (!Double.isFinite(logPeriod)) {
+            throw new ValueFault(
+                    what + " = " + logPeriod + " log d",
+                    "a " + what + " is a finite number",
+                    "rung \"" + name() + "\"",
+                    "give the decimal logarithm of a period in days");
+        }
+    }
+
+    private static Term common(Value offset) {
+        return new Term(COMMON + offset.name(), offset.name(), "", (z, at) -> z);
     }
 
     private static Term metals() {
@@ -130,9 +211,25 @@ public final class PeriodLuminosity implements Rung<PeriodLuminosity> {
      * @return the rung
      */
     public PeriodLuminosity withColour(String column, Source ratio) {
-        definition.data().errors(column + " error", definition.data().unit(column));
-        Term term = new Term(RATIO, "R " + column, column, (r, at) -> r.multiply(at.uncertain(column)));
-        return with(term, definition.parameter(RATIO, ratio));
+        return with(colour(column, ratio), definition.parameter(RATIO, ratio));
+    }
+
+    /**
+     * The same relation made Wesenheit in the fit, with R as a member of a group.
+     *
+     * @param column column of the colour; its errors stand in "{@code column} error"
+     * @param ratio R, the ratio of extinction to reddening
+     * @return the rung
+     */
+    public PeriodLuminosity withColour(String column, SourceGroup.Member ratio) {
+        return with(colour(column, ratio), definition.parameter(RATIO, ratio));
+    }
+
+    private Term colour(String column, Value ratio) {
+        definition.data().errors(column + " error", Unit.MAGNITUDE);
+        definition.data().require(column, Unit.MAGNITUDE);
+        requireUnit(RATIO, ratio, Unit.NONE, Unit.MAGNITUDE);
+        return new Term(RATIO, "R " + column, column, (r, at) -> r.multiply(at.uncertain(column)));
     }
 
     /**
@@ -143,6 +240,8 @@ public final class PeriodLuminosity implements Rung<PeriodLuminosity> {
      * @return the rung
      */
     public PeriodLuminosity withBreak(double logPeriod, Source difference) {
+        requireFinite("break", logPeriod);
+        requireUnit(BREAK, difference, Unit.MAGNITUDE_PER_DEX, Unit.MAGNITUDE);
         Term term = new Term(
                 BREAK,
                 "db min(log P - " + logPeriod + ", 0)",
@@ -160,6 +259,7 @@ public final class PeriodLuminosity implements Rung<PeriodLuminosity> {
      */
     public PeriodLuminosity withOvertones(String column, Source offset) {
         definition.data().column(column);
+        requireUnit(OVERTONE, offset, Unit.MAGNITUDE);
         Term term = new Term(OVERTONE, "o " + column, "", (o, at) -> o.multiply(at.column(column)));
         return with(term, definition.parameter(OVERTONE, offset));
     }
@@ -167,10 +267,11 @@ public final class PeriodLuminosity implements Rung<PeriodLuminosity> {
     /**
      * The same relation with another pivot.
      *
-     * @param logPeriod decimal logarithm of the period (days) at which the zero point is stated
+     * @param logPeriod decimal logarithm of the period (days) at which the zero point is stated, finite
      * @return the rung
      */
     public PeriodLuminosity withPivot(double logPeriod) {
+        requireFinite("pivot", logPeriod);
         return new PeriodLuminosity(definition, logPeriod, terms).related();
     }
 
@@ -181,7 +282,19 @@ public final class PeriodLuminosity implements Rung<PeriodLuminosity> {
      * @return the rung
      */
     public PeriodLuminosity withZeroPoint(Source source) {
+        requireUnit(ZERO_POINT, source, Unit.MAGNITUDE);
         return like(definition.parameter(ZERO_POINT, source));
+    }
+
+    /**
+     * The same relation with another source of the zero point.
+     *
+     * @param member absolute magnitude at the pivot, mag, as a member of a group
+     * @return the rung
+     */
+    public PeriodLuminosity withZeroPoint(SourceGroup.Member member) {
+        requireUnit(ZERO_POINT, member, Unit.MAGNITUDE);
+        return like(definition.parameter(ZERO_POINT, member));
     }
 
     /**
@@ -191,7 +304,19 @@ public final class PeriodLuminosity implements Rung<PeriodLuminosity> {
      * @return the rung
      */
     public PeriodLuminosity withSlope(Source source) {
+        requireUnit(SLOPE, source, Unit.MAGNITUDE_PER_DEX, Unit.MAGNITUDE);
         return like(definition.parameter(SLOPE, source));
+    }
+
+    /**
+     * The same relation with another source of the slope.
+     *
+     * @param member slope, mag per dex, as a member of a group
+     * @return the rung
+     */
+    public PeriodLuminosity withSlope(SourceGroup.Member member) {
+        requireUnit(SLOPE, member, Unit.MAGNITUDE_PER_DEX, Unit.MAGNITUDE);
+        return like(definition.parameter(SLOPE, member));
     }
 
     /**
@@ -201,7 +326,7 @@ public final class PeriodLuminosity implements Rung<PeriodLuminosity> {
      * @return the rung
      */
     public PeriodLuminosity withMetallicity(Source source) {
-        definition.data().require("metallicity", Unit.DEX);
+        requireMetallicity(source);
         return with(metals(), definition.parameter(METALLICITY, source));
     }
 
@@ -212,8 +337,13 @@ public final class PeriodLuminosity implements Rung<PeriodLuminosity> {
      * @return the rung
      */
     public PeriodLuminosity withMetallicity(SourceGroup.Member member) {
-        definition.data().require("metallicity", Unit.DEX);
+        requireMetallicity(member);
         return with(metals(), definition.parameter(METALLICITY, member));
+    }
+
+    private void requireMetallicity(Value coefficient) {
+        definition.data().require("metallicity", Unit.DEX);
+        requireUnit(METALLICITY, coefficient, Unit.MAGNITUDE_PER_DEX, Unit.MAGNITUDE);
     }
 
     /**
@@ -223,8 +353,19 @@ public final class PeriodLuminosity implements Rung<PeriodLuminosity> {
      * @return the rung
      */
     public PeriodLuminosity withCommonOffset(Source offset) {
-        return with(
-                new Term(offset.name(), offset.name(), "", (z, at) -> z), definition.parameter(offset.name(), offset));
+        requireUnit("common offset", offset, Unit.MAGNITUDE);
+        return with(common(offset), definition.parameter(COMMON + offset.name(), offset));
+    }
+
+    /**
+     * The same relation with an offset that all its magnitudes have in common (observed minus true).
+     *
+     * @param offset the offset, mag, as a member of a group
+     * @return the rung
+     */
+    public PeriodLuminosity withCommonOffset(SourceGroup.Member offset) {
+        requireUnit("common offset", offset, Unit.MAGNITUDE);
+        return with(common(offset), definition.parameter(COMMON + offset.name(), offset));
     }
 
     /**

@@ -1,25 +1,23 @@
 package distanceladder.rung;
 
 import distanceladder.astro.Cosmography;
-import distanceladder.astro.Distances;
 import distanceladder.astro.Frame;
 import distanceladder.astro.Unit;
+import distanceladder.covariance.Diagonal;
 import distanceladder.relation.Amount;
+import distanceladder.relation.Datum;
 import distanceladder.relation.Definition;
 import distanceladder.relation.Derived;
-import distanceladder.relation.Dual;
 import distanceladder.relation.Equated;
 import distanceladder.relation.Noise;
 import distanceladder.relation.Observations;
 import distanceladder.relation.Rung;
 import distanceladder.relation.Source;
-import distanceladder.relation.Terms;
+import distanceladder.relation.SourceGroup;
 import distanceladder.relation.Value;
 import distanceladder.text.Figures;
 import distanceladder.text.ValueFault;
-import java.util.ArrayList;
 import java.util.List;
-import java.util.Map;
 import java.util.Optional;
 
 /**
@@ -36,68 +34,27 @@ import java.util.Optional;
  * it unless they approach us. Velocities are c z in the frame in which the expansion is at rest; a dispersion of peculiar
  * velocities is added to their errors by {@link #withPeculiarVelocity}.
  *
- * <p>Columns: {@code velocity}, {@code velocity error}; or {@code redshift}, {@code redshift error}.
+ * <p>The expansion is that of a flat universe to third order (Caldwell and Kamionkowski 2004; Visser 2004), as accurate
+ * as {@link Cosmography} says, at the observed redshift: a peculiar velocity u shifts f too, by a further (1 - q0) z / 2 of
+ * u, which is left out. Peculiar velocities are independent from galaxy to galaxy; where they are not, give {@link Noise}
+ * with a covariance. The forms agree while errors are small against velocities; where they are not, an error is normal
+ * in velocity and lopsided in modulus, and the velocity form is the right one.
+ *
+ * <p>The order in which options are set does not matter: each changes that option, and keeps the rest, the scatter and
+ * the noise that was put in place of the columns' errors. What cannot be kept, because its size is in the unit of the
+ * other form, is refused: {@link #inMagnitudes} comes before a scatter or noise in magnitudes.
+ *
+ * <p>Columns: {@code velocity}, {@code velocity error}; or {@code redshift}, {@code redshift error}; {@code offset}
+ * (modulus of the datum less that of its object, mag) when present.
  */
 public final class VelocityDistance implements Rung<VelocityDistance> {
-    private static final String ETA = "log Hubble constant";
-    private static final String Q0 = "deceleration parameter";
-    private static final String J0 = "jerk parameter";
-    private static final String FACTOR = "expansion factor";
     private static final double TYPICAL = 70;
     private static final double SLOWEST = 10;
 
     private final Definition definition;
-    private final Form form;
+    private final VelocityDistanceForm form;
 
-    /** How the rung is set up; a flow is a column whose parameter of the same name adds to the velocity. */
-    private record Form(
-            double q0,
-            double j0,
-            boolean expansion,
-            boolean varied,
-            double peculiar,
-            boolean magnitudes,
-            List<String> flows) {
-        static final Form PLAIN = new Form(-0.55, 1, true, false, 0, false, List.of());
-
-        double f(double velocity) {
-            return expansion ? Cosmography.f(velocity / Cosmography.LIGHT_KM_PER_S, q0, j0) : 1;
-        }
-
-        Form expanding(double q, double j, boolean terms, boolean sources) {
-            return new Form(q, j, terms, sources, peculiar, magnitudes, flows);
-        }
-
-        Form scattered(double sigma) {
-            return new Form(q0, j0, expansion, varied, sigma, magnitudes, flows);
-        }
-
-        Form inMagnitudes() {
-            return new Form(q0, j0, expansion, varied, peculiar, true, flows);
-        }
-
-        Form with(String flow) {
-            List<String> more = new ArrayList<>(flows);
-            if (!more.contains(flow)) {
-                more.add(flow);
-            }
-            return new Form(q0, j0, expansion, varied, peculiar, magnitudes, List.copyOf(more));
-        }
-
-        /** The expansion factor of a datum: its column, or with the sources of q0 and j0. */
-        Dual factor(Dual like, Terms at) {
-            double fixed = at.column(FACTOR);
-            if (!varied) {
-                return like.constant(fixed);
-            }
-            double z = at.column("velocity") / Cosmography.LIGHT_KM_PER_S;
-            Dual q = at.parameter(Q0);
-            Dual second = q.negate().add(1).subtract(q.square().multiply(3)).add(at.parameter(J0));
-            return q.negate().add(1).multiply(0.5 * z).add(1).subtract(second.multiply(z * z / 6));
-        }
-    }
-
-    private VelocityDistance(Definition definition, Form form) {
+    private VelocityDistance(Definition definition, VelocityDistanceForm form) {
         this.definition = definition;
         this.form = form;
     }
@@ -110,13 +67,17 @@ public final class VelocityDistance implements Rung<VelocityDistance> {
      * @return the rung
      */
     public static VelocityDistance of(String name, Observations data) {
-        Observations full = data.has("velocity") ? data : withVelocity(data);
-        full.require("velocity", Unit.KILOMETRE_PER_SECOND);
-        full.errors("velocity error", Unit.KILOMETRE_PER_SECOND);
+        Observations full = data.has(VelocityDistanceForm.VELOCITY) ? data : withVelocity(data);
+        full.require(VelocityDistanceForm.VELOCITY, Unit.KILOMETRE_PER_SECOND);
+        if (full.has(VelocityDistanceForm.APART)) {
+            full.require(VelocityDistanceForm.APART, Unit.MAGNITUDE);
+        }
+        double[] errors = full.errors(VelocityDistanceForm.ERROR, Unit.KILOMETRE_PER_SECOND);
         Source eta = Source.free(name + " 5 log H0", Unit.MAGNITUDE).starting(5 * StrictMath.log10(TYPICAL));
-        Definition definition = Definition.of(name, full, "velocity", Equated.of((mu, at) -> mu))
-                .parameter(ETA, eta);
-        return new VelocityDistance(definition, Form.PLAIN).related();
+        Definition bare = Definition.of(name, full, VelocityDistanceForm.VELOCITY, Equated.of((mu, at) -> mu))
+                .withNoise(Noise.of(errors))
+                .parameter(VelocityDistanceForm.ETA, eta);
+        return new VelocityDistance(bare, VelocityDistanceForm.PLAIN).with(VelocityDistanceForm.PLAIN);
     }
 
     private static Observations withVelocity(Observations data) {
@@ -127,96 +88,96 @@ public final class VelocityDistance implements Rung<VelocityDistance> {
             z[i] *= Cosmography.LIGHT_KM_PER_S;
             errors[i] *= Cosmography.LIGHT_KM_PER_S;
         }
-        return data.with("velocity", Unit.KILOMETRE_PER_SECOND, z)
-                .with("velocity error", Unit.KILOMETRE_PER_SECOND, errors);
+        return data.with(VelocityDistanceForm.VELOCITY, Unit.KILOMETRE_PER_SECOND, z)
+                .with(VelocityDistanceForm.ERROR, Unit.KILOMETRE_PER_SECOND, errors);
     }
 
-    /** The definition that belongs to the form; columns are computed from the velocities each time. */
-    private VelocityDistance related() {
+    /** The rung in another form; its columns are computed from the velocities each time. */
+    private VelocityDistance with(VelocityDistanceForm next) {
         Observations data = definition.data();
-        double[] v = data.column("velocity");
-        double[] errors = data.column("velocity error");
-        double[] f = new double[v.length];
-        for (int i = 0; i < v.length; i++) {
-            f[i] = form.f(v[i]);
-            errors[i] = Math.sqrt(errors[i] * errors[i] + form.peculiar * form.peculiar);
+        double[] f = next.factors(data);
+        Observations full = data.with(VelocityDistanceForm.FACTOR, Unit.NONE, f);
+        if (next.magnitudes()) {
+            full = full.with(VelocityDistanceForm.MODULUS, Unit.MAGNITUDE, next.moduli(data, f));
         }
-        Observations full = data.with(FACTOR, Unit.NONE, f);
-        return new VelocityDistance(
-                form.magnitudes ? inMagnitudes(full, v, errors, f) : inVelocity(full, errors), form);
+        Definition fresh = Definition.of(
+                        name(), full, next.observable(), relation(next, data.has(VelocityDistanceForm.APART)))
+                .restingOn(definition.restsOn())
+                .withCalibrators(definition.calibrators())
+                .withNoise(noise(next))
+                .described(next.magnitudes() ? "5 log(c z f(z)) + 25 = mu + 5 log H0" : "c z f(z) = H0 d");
+        return new VelocityDistance(withParameters(fresh, next), next);
     }
 
-    private Definition inVelocity(Observations full, double[] errors) {
-        Form setUp = form;
-        Equated relation = Equated.of((mu, at) -> {
-                    Dual v = at.parameter(ETA).add(mu).subtract(25).divide(5).tenTo();
-                    v = v.divide(setUp.factor(v, at));
-                    for (String flow : setUp.flows) {
-                        v = v.add(at.parameter(flow).multiply(at.column(flow)));
-                    }
-                    return v;
-                })
-                .startingAt(d ->
-                        5 * StrictMath.log10(Math.max(Math.max(d.observed(), d.sigma()), SLOWEST) / TYPICAL) + 25)
-                .refusing(d -> refusal(d.observed()));
-        return described(
-                Definition.of(definition.name(), full, "velocity", relation).withNoise(Noise.of(errors)),
-                "c z f(z) = H0 d");
-    }
-
-    private Definition inMagnitudes(Observations full, double[] v, double[] errors, double[] f) {
-        double[] y = new double[v.length];
-        double[] sigmas = new double[v.length];
-        for (int i = 0; i < v.length; i++) {
-            if (!(v[i] > 0)) {
-                throw new ValueFault(
-                        "velocity = " + v[i] + " km/s",
-                        "the magnitude form takes the logarithm of the velocity",
-                        full.label() + ", datum \"" + full.names().get(i) + "\"",
-                        "use the velocity form, or leave the datum out");
+    private Definition withParameters(Definition fresh, VelocityDistanceForm next) {
+        Definition out = fresh;
+        for (String role : definition.parameters().keySet()) {
+            if (!next.varied() && (role.equals(VelocityDistanceForm.Q0) || role.equals(VelocityDistanceForm.J0))) {
+                continue;
             }
-            y[i] = 5 * StrictMath.log10(v[i] * f[i]) + 25;
-            sigmas[i] = Distances.modulusError(errors[i] / v[i]);
+            out = definition.value(role) instanceof SourceGroup.Member member
+                    ? out.parameter(role, member)
+                    : out.parameter(role, (Source) definition.value(role));
         }
-        Observations with = full.with("expansion modulus", Unit.MAGNITUDE, y);
-        Form setUp = form;
-        Equated relation = Equated.of((mu, at) -> {
-            Dual modulus = mu.add(at.parameter(ETA));
-            if (setUp.varied) {
-                Dual relative = setUp.factor(modulus, at).divide(at.column(FACTOR));
-                modulus = modulus.subtract(relative.log10().multiply(5));
-            }
-            for (String flow : setUp.flows) {
-                double slope = Distances.modulusError(at.column(flow) / at.column("velocity"));
-                modulus = modulus.add(at.parameter(flow).multiply(slope));
-            }
-            return modulus;
-        });
-        return described(
-                Definition.of(definition.name(), with, "expansion modulus", relation)
-                        .withNoise(Noise.of(sigmas)),
-                "5 log(c z f(z)) + 25 = mu + 5 log H0");
+        return withEta(out);
     }
 
-    private Definition described(Definition fresh, String words) {
-        Source eta = eta();
-        Derived hubble = Derived.of(
+    private static Equated relation(VelocityDistanceForm form, boolean apart) {
+        Equated relation = form.magnitudes()
+                ? Equated.of(form::modulus)
+                : Equated.of(form::velocity)
+                        .startingAt(d -> start(d) - (apart ? d.column(VelocityDistanceForm.APART) : 0))
+                        .refusing(d -> refusal(d.observed()));
+        return apart ? relation.withOffsets(VelocityDistanceForm.APART) : relation;
+    }
+
+    private static double start(Datum d) {
+        return 5 * StrictMath.log10(Math.max(Math.max(d.observed(), d.sigma()), SLOWEST) / TYPICAL) + 25;
+    }
+
+    /** The columns' errors in another form; noise that the user gave is kept, or refused where it cannot be. */
+    private Noise noise(VelocityDistanceForm next) {
+        Noise now = definition.noise();
+        boolean columns = form.isNoise(now, definition.data());
+        boolean none = now.covariance()
+                .equals(Diagonal.fromVariances(new double[definition.data().size()]));
+        boolean rescaled = next.magnitudes() != form.magnitudes();
+        boolean sized = now.scatter() > 0 || now.joint().isPresent() || !(columns || none);
+        if ((rescaled && sized) || (next.peculiar() != form.peculiar() && !columns)) {
+            throw new ValueFault(
+                    rescaled ? "noise or scatter in " + Unit.KILOMETRE_PER_SECOND.symbol() : "noise of its own",
+                    rescaled
+                            ? "the magnitude form has its noise in magnitudes"
+                            : "a peculiar velocity is added to the errors of the columns",
+                    "rung \"" + name() + "\"",
+                    rescaled
+                            ? "call inMagnitudes first, and give noise and scatter in mag"
+                            : "call withPeculiarVelocity first, or give noise that holds it");
+        }
+        return columns ? now.withCovariance(Diagonal.fromStandardDeviations(next.sigmas(definition.data()))) : now;
+    }
+
+    private void requireUnit(String role, Value parameter, Unit wanted) {
+        if (!parameter.unit().dimension().equals(wanted.dimension())) {
+            throw new ValueFault(
+                    role + " \"" + parameter.name() + "\" in "
+                            + parameter.unit().symbol(),
+                    "the " + role + " is a " + wanted.dimension(),
+                    "rung \"" + name() + "\"",
+                    "give a source in such a unit");
+        }
+    }
+
+    private static Definition withEta(Definition definition) {
+        return definition.highlighting(List.of(hubble(definition.value(VelocityDistanceForm.ETA))));
+    }
+
+    private static Derived hubble(Value eta) {
+        return Derived.of(
                 "Hubble constant",
                 Unit.KILOMETRE_PER_SECOND_PER_MEGAPARSEC,
                 List.of(eta),
                 in -> in.get(0).divide(5).tenTo());
-        Definition out = fresh.restingOn(definition.restsOn())
-                .withCalibrators(definition.calibrators())
-                .described(words)
-                .highlighting(List.of(hubble));
-        for (Map.Entry<String, String> entry : definition.parameters().entrySet()) {
-            out = out.parameter(entry.getKey(), (Source) definition.value(entry.getKey()));
-        }
-        return out;
-    }
-
-    private Source eta() {
-        return (Source) definition.value(ETA);
     }
 
     private static Optional<String> refusal(double velocity) {
@@ -231,10 +192,10 @@ public final class VelocityDistance implements Rung<VelocityDistance> {
      *
      * @param q0 deceleration parameter
      * @param j0 jerk parameter
-     * @return the rung, its noise that of the columns
+     * @return the rung
      */
     public VelocityDistance withExpansion(double q0, double j0) {
-        return new VelocityDistance(definition, form.expanding(q0, j0, true, false)).related();
+        return with(form.expanding(q0, j0, true, false));
     }
 
     /**
@@ -242,18 +203,20 @@ public final class VelocityDistance implements Rung<VelocityDistance> {
      *
      * @param q0 source of the deceleration parameter
      * @param j0 source of the jerk parameter
-     * @return the rung, its noise that of the columns
+     * @return the rung
      */
     public VelocityDistance withExpansion(Source q0, Source j0) {
-        Definition d = definition.parameter(Q0, q0).parameter(J0, j0);
-        return new VelocityDistance(d, form.expanding(q0.mean()[0], j0.mean()[0], true, true)).related();
+        requireUnit(VelocityDistanceForm.Q0, q0, Unit.NONE);
+        requireUnit(VelocityDistanceForm.J0, j0, Unit.NONE);
+        Definition d = definition.parameter(VelocityDistanceForm.Q0, q0).parameter(VelocityDistanceForm.J0, j0);
+        return new VelocityDistance(d, form).with(form.expanding(q0.mean()[0], j0.mean()[0], true, true));
     }
 
     /**
      * The same relation with a common velocity added to all, as a diagnostic: the relation itself has no intercept.
      *
      * @param source the intercept, a velocity
-     * @return the rung, its noise that of the columns
+     * @return the rung
      */
     public VelocityDistance withIntercept(Source source) {
         double[] one = new double[definition.data().size()];
@@ -270,7 +233,7 @@ public final class VelocityDistance implements Rung<VelocityDistance> {
      * @param x source of the velocity towards ra 0, dec 0
      * @param y source of the velocity towards ra 90, dec 0
      * @param z source of the velocity towards the north pole
-     * @return the rung, its noise that of the columns
+     * @return the rung
      */
     public VelocityDistance withBulkMotion(Source x, Source y, Source z) {
         definition.data().require("right ascension", Unit.DEGREE);
@@ -289,11 +252,11 @@ public final class VelocityDistance implements Rung<VelocityDistance> {
     }
 
     private VelocityDistance withFlow(String role, Source source, double[] column) {
-        source.unit().convert(0, Unit.KILOMETRE_PER_SECOND);
+        requireUnit(role, source, Unit.KILOMETRE_PER_SECOND);
         Definition d = definition
                 .withData(definition.data().with(role, Unit.NONE, column), definition.noise())
                 .parameter(role, source);
-        return new VelocityDistance(d, form.with(role)).related();
+        return new VelocityDistance(d, form).with(form.with(role));
     }
 
     /**
@@ -329,30 +292,38 @@ public final class VelocityDistance implements Rung<VelocityDistance> {
     /**
      * The same relation with f = 1: velocity proportional to distance.
      *
-     * @return the rung, its noise that of the columns
+     * @return the rung
      */
     public VelocityDistance withoutExpansionTerms() {
-        return new VelocityDistance(definition, form.expanding(0, 0, false, false)).related();
+        return with(form.expanding(0, 0, false, false));
     }
 
     /**
-     * The same relation with a dispersion of peculiar velocities added to each error in quadrature.
+     * The same relation with a dispersion of peculiar velocities added to each column's error in quadrature.
      *
-     * @param dispersion standard deviation along the line of sight, a velocity
-     * @return the rung, its noise that of the columns
+     * @param dispersion standard deviation along the line of sight, a velocity of 0 or more; it replaces an earlier one
+     * @return the rung; refused when the columns' errors were replaced by other noise
      */
     public VelocityDistance withPeculiarVelocity(Amount dispersion) {
-        double sigma = dispersion.in(Unit.KILOMETRE_PER_SECOND).value();
-        return new VelocityDistance(definition, form.scattered(sigma)).related();
+        double sigma = Unit.KILOMETRE_PER_SECOND.toBase(
+                dispersion.in(Unit.KILOMETRE_PER_SECOND).value());
+        if (!(sigma >= 0)) {
+            throw new ValueFault(
+                    "peculiar velocity = " + dispersion.text(),
+                    "a dispersion is 0 or more",
+                    "rung \"" + name() + "\"",
+                    "give its standard deviation");
+        }
+        return with(form.scattered(sigma));
     }
 
     /**
      * The same relation in magnitudes, linear; for a far flow.
      *
-     * @return the rung, its noise that of the columns
+     * @return the rung; refused when a velocity is not above zero, or when scatter or noise in km/s was given before
      */
     public VelocityDistance inMagnitudes() {
-        return new VelocityDistance(definition, form.inMagnitudes()).related();
+        return with(form.inMagnitudes());
     }
 
     /**
@@ -362,7 +333,19 @@ public final class VelocityDistance implements Rung<VelocityDistance> {
      * @return the rung
      */
     public VelocityDistance withLogHubbleConstant(Source source) {
-        return new VelocityDistance(definition.parameter(ETA, source), form).related();
+        requireUnit(VelocityDistanceForm.ETA, source, Unit.MAGNITUDE);
+        return like(withEta(definition.parameter(VelocityDistanceForm.ETA, source)));
+    }
+
+    /**
+     * The same relation with a member of a group as 5 log10 H0.
+     *
+     * @param member 5 log10 of the Hubble constant in km/s/Mpc, mag
+     * @return the rung
+     */
+    public VelocityDistance withLogHubbleConstant(SourceGroup.Member member) {
+        requireUnit(VelocityDistanceForm.ETA, member, Unit.MAGNITUDE);
+        return like(withEta(definition.parameter(VelocityDistanceForm.ETA, member)));
     }
 
     /**
@@ -371,7 +354,7 @@ public final class VelocityDistance implements Rung<VelocityDistance> {
      * @return handle of H0 in km/s/Mpc
      */
     public Derived hubbleConstant() {
-        return (Derived) definition.highlights().get(0);
+        return hubble(logHubbleConstant());
     }
 
     /**
@@ -380,7 +363,7 @@ public final class VelocityDistance implements Rung<VelocityDistance> {
      * @return handle of the unknown itself, mag
      */
     public Value logHubbleConstant() {
-        return definition.value(ETA);
+        return definition.value(VelocityDistanceForm.ETA);
     }
 
     @Override
