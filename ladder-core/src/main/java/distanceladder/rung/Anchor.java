@@ -211,8 +211,7 @@ public final class Anchor implements Rung<Anchor> {
         if (sigma(other) == sigma(given)) {
             return now;
         }
-        if (now.mode() == Noise.Scatter.EXACT
-                || !now.covariance().equals(Diagonal.fromStandardDeviations(sigma(given)))) {
+        if (!now.covariance().equals(Diagonal.fromStandardDeviations(sigma(given)))) {
             throw new ValueFault(
                     "standard deviation = " + other.sigma() + " " + other.unit().symbol(),
                     "an anchor whose noise was replaced keeps that noise",

@@ -1,6 +1,7 @@
 package distanceladder.rung;
 
 import distanceladder.astro.Unit;
+import distanceladder.astro.Wesenheit;
 import distanceladder.relation.Definition;
 import distanceladder.relation.Dual;
 import distanceladder.relation.Equated;
@@ -98,7 +99,7 @@ public final class PeriodLuminosity implements Rung<PeriodLuminosity> {
 
     /**
      * The Wesenheit magnitude of three bands, {@code W = m_a - R (m_b - m_c)}, free of reddening when R is the ratio of
-     * total absorption in band a to the reddening of colour b - c (Madore 1982).
+     * total absorption in band a to the reddening of colour b - c (Madore 1982; {@link Wesenheit} has it for single numbers).
      *
      * <p>Its variance is that of independent errors in the bands: {@code e_a^2 + R^2 (e_b^2 + e_c^2)} for three different
      * bands; a band that stands twice enters once, with its whole coefficient ({@code (1 - R)^2 e_a^2 + R^2 e_c^2} for b =

@@ -136,8 +136,7 @@ record VelocityDistanceForm(
 
     /** Whether the known errors are just those of the columns, to the bit: else the user put others in their place. */
     boolean isNoise(Noise noise, Observations data) {
-        return noise.mode() != Noise.Scatter.EXACT
-                && noise.covariance().equals(Diagonal.fromStandardDeviations(sigmas(data)));
+        return noise.covariance().equals(Diagonal.fromStandardDeviations(sigmas(data)));
     }
 
     private static ValueFault fault(Observations data, int datum, String rule, String repair) {

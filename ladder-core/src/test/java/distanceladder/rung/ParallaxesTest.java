@@ -112,6 +112,10 @@ class ParallaxesTest {
                 (i, mu, s) -> Slopes.tenTo((10 - mu) / 5)
                         + s.applyAsDouble("offset")
                         + s.applyAsDouble("offset by colour") * colour[i]);
+        Definition d = Parallaxes.of("p", STARS.with("colour", Unit.MAGNITUDE, colour))
+                .withOffsetTerm("colour", Source.exact("slope", milliarcseconds(0.2)))
+                .definition();
+        assertTrue(d.relation().refusal(d, 2, d.relation().start(d)).isEmpty(), "-0.1 + 0.2 is above zero");
         assertThrows(NameFault.class, () -> full.withOffsetTerm("color", OFFSET));
         assertThrows(ValueFault.class, () -> full.withOffsetTerm("colour", Source.free("x", Unit.MAGNITUDE)));
     }

@@ -8,6 +8,7 @@ import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import distanceladder.astro.Unit;
+import distanceladder.astro.Wesenheit;
 import distanceladder.relation.Noise;
 import distanceladder.relation.Observations;
 import distanceladder.relation.Source;
@@ -191,6 +192,16 @@ class PeriodLuminosityTest {
         assertEquals(square(2.55 * 0.02) + square(1.55 * 0.05), square(redder.column("magnitude error")[0]), 1e-16);
         Observations bluer = PeriodLuminosity.wesenheit(BANDS, 0.4, "V", "V", "I");
         assertEquals(square(0.6 * 0.05) + square(0.4 * 0.02), square(bluer.column("magnitude error")[0]), 1e-16);
+    }
+
+    @Test
+    void columnsAreWhatSingleNumbersAre() {
+        Wesenheit law = new Wesenheit(0.4);
+        Observations three = PeriodLuminosity.wesenheit(BANDS, 0.4, "H", "V", "I");
+        assertEquals(law.magnitude(21.0, 23.5, 22.2), three.column("magnitude")[1], 1e-13);
+        assertEquals(law.sigma(0.04, 0.06, 0.03), three.column("magnitude error")[1], 1e-15);
+        Observations two = PeriodLuminosity.wesenheit(BANDS, 0.4, "I", "V", "I");
+        assertEquals(law.sigmaOfTwoBands(0.03, 0.06), two.column("magnitude error")[1], 1e-15);
     }
 
     @Test
