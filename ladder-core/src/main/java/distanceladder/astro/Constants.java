@@ -9,6 +9,7 @@ public final class Constants {
     public static final double AU_M = 149597870700.0;
 
     /** Parsec in m, {@code 648000 / pi} astronomical units (IAU 2015 Resolution B2), rounded to a double. */
+    @SuppressWarnings("FloatingPointLiteralPrecision") // Its shortest decimal differs between virtual machines.
     public static final double PC_M = 3.0856775814913672e16;
 
     /** Megaparsec in km, from {@link #PC_M}. */
