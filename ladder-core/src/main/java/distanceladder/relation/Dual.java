@@ -259,28 +259,37 @@ public final class Dual {
         out.curved = curved || v.curved;
         if (to == from) {
             scaled(v, b, out);
-            return out;
+        } else if (v.to == v.from) {
+            scaled(this, a, out);
+        } else {
+            combined(a, v, b, out);
         }
-        scaled(this, a, out);
-        double[] mine = out.partial;
-        double[] theirs = v.partial;
-        if (v.to == v.from) {
-            return out;
-        }
+        return out;
+    }
+
+    private void combined(double a, Dual v, double b, Dual out) {
+        double[] sum = out.partial;
         int low = Math.min(from, v.from);
         int high = Math.max(to, v.to);
         for (int i = low; i < from; i++) {
-            mine[i] = 0;
+            sum[i] = 0;
+        }
+        double[] mine = partial;
+        for (int i = from; i < to; i++) {
+            sum[i] = a * mine[i];
         }
         for (int i = to; i < high; i++) {
-            mine[i] = 0;
+            sum[i] = 0;
         }
-        for (int i = v.from; i < v.to; i++) {
-            mine[i] += b * theirs[i];
-        }
+        double[] theirs = v.partial;
+        int end = v.to;
+        int i = v.from;
+        do {
+            sum[i] += b * theirs[i];
+            i++;
+        } while (i < end);
         out.from = low;
         out.to = high;
-        return out;
     }
 
     private Dual chained(double w, double slope, boolean bends) {
@@ -293,11 +302,19 @@ public final class Dual {
     }
 
     private static void scaled(Dual v, double factor, Dual out) {
-        out.from = v.from;
-        out.to = v.to;
-        for (int i = v.from; i < v.to; i++) {
-            out.partial[i] = factor * v.partial[i];
+        int i = v.from;
+        int end = v.to;
+        out.from = i;
+        out.to = end;
+        if (i == end) {
+            return;
         }
+        double[] theirs = v.partial;
+        double[] mine = out.partial;
+        do {
+            mine[i] = factor * theirs[i];
+            i++;
+        } while (i < end);
     }
 
     @Override

@@ -192,11 +192,14 @@ public final class Equated implements Relation {
 
     private static double[] row(Dual g, Points at, int p, double right) {
         double[] row = new double[p + 1];
-        row[p] = right;
-        for (int j = 0; j < p; j++) {
-            row[j] = g.partial(j + 1);
-            row[p] += row[j] * at.parameter(j);
+        double sum = right;
+        int end = Math.min(g.to, p + 1);
+        for (int j = Math.max(g.from, 1); j < end; j++) {
+            double slope = g.partial[j];
+            row[j - 1] = slope;
+            sum += slope * at.parameter(j - 1);
         }
+        row[p] = sum;
         return row;
     }
 

@@ -1,8 +1,7 @@
 package distanceladder.relation;
 
-import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.HashMap;
-import java.util.List;
 import java.util.Map;
 import java.util.function.Function;
 
@@ -13,8 +12,8 @@ import java.util.function.Function;
 final class Recall<T> {
     private final Function<String, T> find;
     private final Map<String, T> known = new HashMap<>();
-    private final List<String> names = new ArrayList<>();
-    private final List<T> things = new ArrayList<>();
+    private String[] names = new String[0];
+    private Object[] things = new Object[0];
     private int next;
 
     Recall(Function<String, T> find) {
@@ -26,24 +25,23 @@ final class Recall<T> {
         next = 0;
     }
 
-    @SuppressWarnings("ReferenceEquality")
+    @SuppressWarnings({"ReferenceEquality", "unchecked"})
     T get(String name) {
         int at = next++;
-        if (at < names.size() && names.get(at) == name) {
-            return things.get(at);
+        if (at < names.length && names[at] == name) {
+            return (T) things[at];
         }
-        T thing = known.get(name);
-        if (thing == null) {
-            thing = find.apply(name);
-            known.put(name, thing);
+        return lookedUp(name, at);
+    }
+
+    private T lookedUp(String name, int at) {
+        T thing = known.computeIfAbsent(name, find);
+        if (at >= names.length) {
+            names = Arrays.copyOf(names, 2 * at + 8);
+            things = Arrays.copyOf(things, names.length);
         }
-        if (at < names.size()) {
-            names.set(at, name);
-            things.set(at, thing);
-        } else if (at == names.size()) {
-            names.add(name);
-            things.add(thing);
-        }
+        names[at] = name;
+        things[at] = thing;
         return thing;
     }
 }
