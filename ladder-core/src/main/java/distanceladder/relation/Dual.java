@@ -17,16 +17,20 @@ import distanceladder.astro.PowersOfTen;
 public final class Dual {
     private static final double LN10 = StrictMath.log(10);
 
+    /** The number depends on no variable. */
+    static final int NONE = -1;
+    /** The number depends on several variables, or may. */
+    static final int MANY = -2;
+
     private final Tape tape;
-    final double[] partial;
     double value;
-    boolean constant;
     boolean curved;
-
-    /** Partial derivatives outside [from, to) are zero and not stored: most numbers depend on few variables. */
-    int from;
-
-    int to;
+    /** The one variable that the number depends on, or one of the two above. */
+    int only;
+    /** The derivative by that one; most terms of a relation are one parameter times a number. */
+    double slope;
+    /** All derivatives, when there are many. */
+    private final double[] partial;
 
     Dual(Tape tape, int variables) {
         this.tape = tape;
@@ -49,7 +53,10 @@ public final class Dual {
      * @return d this / d variable
      */
     public double partial(int variable) {
-        return variable >= from && variable < to ? partial[variable] : 0;
+        if (only == MANY) {
+            return partial[variable];
+        }
+        return only == variable ? slope : 0;
     }
 
     /**
@@ -128,7 +135,7 @@ public final class Dual {
      */
     public Dual multiply(Dual v) {
         Dual w = linear(value * v.value, v.value, v, value);
-        w.curved |= !constant && !v.constant;
+        w.curved |= only != NONE && v.only != NONE;
         return w;
     }
 
@@ -152,7 +159,7 @@ public final class Dual {
         double inverse = 1 / v.value;
         double q = value * inverse;
         Dual w = linear(q, inverse, v, -q * inverse);
-        w.curved |= !v.constant;
+        w.curved |= v.only != NONE;
         return w;
     }
 
@@ -255,66 +262,64 @@ public final class Dual {
     private Dual linear(double w, double a, Dual v, double b) {
         Dual out = tape.next();
         out.value = w;
-        out.constant = constant && v.constant;
         out.curved = curved || v.curved;
-        if (to == from) {
-            scaled(v, b, out);
-        } else if (v.to == v.from) {
-            scaled(this, a, out);
+        if (only != MANY && v.only != MANY && (only == v.only || only == NONE || v.only == NONE)) {
+            out.only = Math.max(only, v.only);
+            out.slope = a * term() + b * v.term();
+            return out;
+        }
+        out.only = MANY;
+        if (only == MANY && v.only == MANY) {
+            for (int i = 0; i < partial.length; i++) {
+                out.partial[i] = a * partial[i] + b * v.partial[i];
+            }
+        } else if (v.only == MANY) {
+            out.plus(v, b, this, a);
         } else {
-            combined(a, v, b, out);
+            out.plus(this, a, v, b);
         }
         return out;
     }
 
-    private void combined(double a, Dual v, double b, Dual out) {
-        double[] sum = out.partial;
-        int low = Math.min(from, v.from);
-        int high = Math.max(to, v.to);
-        for (int i = low; i < from; i++) {
-            sum[i] = 0;
-        }
-        double[] mine = partial;
-        for (int i = from; i < to; i++) {
-            sum[i] = a * mine[i];
-        }
-        for (int i = to; i < high; i++) {
-            sum[i] = 0;
-        }
-        double[] theirs = v.partial;
-        int end = v.to;
-        int i = v.from;
-        do {
-            sum[i] += b * theirs[i];
-            i++;
-        } while (i < end);
-        out.from = low;
-        out.to = high;
+    /** The derivative by the only variable. */
+    private double term() {
+        return only == NONE ? 0 : slope;
     }
 
-    private Dual chained(double w, double slope, boolean bends) {
-        Dual out = tape.next();
-        out.value = w;
-        out.constant = constant;
-        out.curved = curved || (bends && !constant);
-        scaled(this, slope, out);
-        return out;
+    /** Derivatives of a u + b v, where v has one or none. */
+    private void plus(Dual u, double a, Dual v, double b) {
+        if (u.only == MANY) {
+            scale(u.partial, a);
+        } else {
+            java.util.Arrays.fill(partial, 0);
+            partial[u.only] = a * u.slope;
+        }
+        if (v.only != NONE) {
+            partial[v.only] += b * v.slope;
+        }
     }
 
-    private static void scaled(Dual v, double factor, Dual out) {
-        int i = v.from;
-        int end = v.to;
-        out.from = i;
-        out.to = end;
-        if (i == end) {
+    private void scale(double[] other, double a) {
+        if (a == 1) {
+            System.arraycopy(other, 0, partial, 0, partial.length);
             return;
         }
-        double[] theirs = v.partial;
-        double[] mine = out.partial;
-        do {
-            mine[i] = factor * theirs[i];
-            i++;
-        } while (i < end);
+        for (int i = 0; i < partial.length; i++) {
+            partial[i] = a * other[i];
+        }
+    }
+
+    private Dual chained(double w, double factor, boolean bends) {
+        Dual out = tape.next();
+        out.value = w;
+        out.only = only;
+        out.curved = curved || (bends && only != NONE);
+        if (only == MANY) {
+            out.scale(partial, factor);
+        } else {
+            out.slope = factor * slope;
+        }
+        return out;
     }
 
     @Override

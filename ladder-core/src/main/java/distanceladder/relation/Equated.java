@@ -193,11 +193,10 @@ public final class Equated implements Relation {
     private static double[] row(Dual g, Points at, int p, double right) {
         double[] row = new double[p + 1];
         double sum = right;
-        int end = Math.min(g.to, p + 1);
-        for (int j = Math.max(g.from, 1); j < end; j++) {
-            double slope = g.partial[j];
-            row[j - 1] = slope;
-            sum += slope * at.parameter(j - 1);
+        for (int j = 0; j < p; j++) {
+            double slope = g.partial(j + 1);
+            row[j] = slope;
+            sum += slope * at.parameter(j);
         }
         row[p] = sum;
         return row;

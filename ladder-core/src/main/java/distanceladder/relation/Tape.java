@@ -5,11 +5,12 @@ import java.util.Arrays;
 /** The store of {@link Dual} numbers that one row after the other uses again. */
 final class Tape {
     private final int variables;
-    private Dual[] store = new Dual[0];
+    private Dual[] store;
     private int used;
 
     Tape(int variables) {
         this.variables = variables;
+        this.store = new Dual[0];
     }
 
     /** Makes all numbers free for use again. */
@@ -19,43 +20,42 @@ final class Tape {
 
     Dual next() {
         if (used == store.length) {
-            int old = store.length;
-            store = Arrays.copyOf(store, 2 * old + 16);
-            for (int i = old; i < store.length; i++) {
-                store[i] = new Dual(this, variables);
-            }
+            grow();
         }
         return store[used++];
     }
 
-    Dual constant(double x) {
-        return set(next(), x);
+    private void grow() {
+        Dual[] more = Arrays.copyOf(store, 16 + 2 * store.length);
+        for (int i = store.length; i < more.length; i++) {
+            more[i] = new Dual(this, variables);
+        }
+        store = more;
     }
 
-    private static Dual set(Dual out, double x) {
+    Dual constant(double x) {
+        Dual out = next();
         out.value = x;
-        out.constant = true;
+        out.only = Dual.NONE;
+        out.slope = 0;
         out.curved = false;
-        out.from = 0;
-        out.to = 0;
         return out;
     }
 
     Dual variable(int index, double x) {
-        return varied(next(), index, x);
+        return set(next(), index, x);
     }
 
-    /** A variable with a store of its own, which no rewinding takes back. */
+    /** A variable that stays when others are made free. */
     Dual lasting(int index, double x) {
-        return varied(new Dual(this, variables), index, x);
+        return set(new Dual(this, variables), index, x);
     }
 
-    private static Dual varied(Dual out, int index, double x) {
-        set(out, x);
-        out.constant = false;
-        out.from = index;
-        out.to = index + 1;
-        out.partial[index] = 1;
+    private static Dual set(Dual out, int index, double x) {
+        out.value = x;
+        out.only = index;
+        out.slope = 1;
+        out.curved = false;
         return out;
     }
 }
