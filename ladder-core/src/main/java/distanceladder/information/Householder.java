@@ -6,7 +6,7 @@ package distanceladder.information;
  * <p>A system of m rows {@code [A | y]} (each row p coefficients, then its right side, all divided by their standard
  * deviation) is folded into an upper triangle {@code [R | z]} by reflections {@code H = I - beta v vT}, one for each
  * column j: {@code v = (R_jj - alpha, A_1j, ..., A_mj)}, {@code alpha = -sign(R_jj) s}, {@code s = |(R_jj, A_.j)|},
- * {@code beta = 1 / (s (s + |R_jj|))} (Householder 1958; Golub and Van Loan 2013, section 5.1). Afterwards
+ * {@code beta = 1 / (s (s + |R_jj|))}; where these would underflow, v over its first element, {@code beta = (s + |R_jj|) / s} (Householder 1958; Golub and Van Loan 2013, section 5.1). Afterwards
  * {@code |A x - y|^2 + |R x - z|^2} (old triangle) is {@code |R x - z|^2} (new triangle) plus a constant, the sum of
  * squares that is left in the right sides. The vectors stay in the columns of the rows, so that the transformation can
  * be run backwards: see {@link #back}.
@@ -15,6 +15,8 @@ package distanceladder.information;
  * every virtual machine.
  */
 final class Householder {
+    private static final double SMALL = 1e-140;
+
     private Householder() {}
 
     /**
@@ -23,7 +25,7 @@ final class Householder {
      *
      * @param triangle p rows of length p + 1, row j is zero before column j; updated
      * @param rows m rows of length p + 1; overwritten
-     * @param heads receives R_jj - alpha and beta of each column, 2 p numbers
+     * @param heads receives the first element and beta of each column, 2 p numbers
      * @return the sum of squares left in the right sides
      */
     static double absorb(double[][] triangle, double[][] rows, double[] heads) {
@@ -31,26 +33,34 @@ final class Householder {
         double[] w = new double[p + 1];
         for (int j = 0; j < p; j++) {
             double below = 0;
+            double largest = 0;
             int first = rows.length;
             int last = -1;
             for (int i = 0; i < rows.length; i++) {
                 double x = rows[i][j];
                 if (x != 0) {
                     below += x * x;
+                    largest = Math.max(largest, Math.abs(x));
                     first = Math.min(first, i);
                     last = i;
                 }
             }
-            if (below == 0) {
+            if (largest == 0) {
                 heads[2 * j] = 0;
                 heads[2 * j + 1] = 0;
                 continue;
             }
             double[] top = triangle[j];
-            double s = Math.sqrt(top[j] * top[j] + below);
+            boolean plain = largest > SMALL;
+            double s = plain ? Math.sqrt(top[j] * top[j] + below) : length(rows, j, top[j], largest);
             double alpha = top[j] > 0 ? -s : s;
             double head = top[j] - alpha;
             double beta = 1 / (s * (s + Math.abs(top[j])));
+            if (!plain) {
+                beta = (s + Math.abs(top[j])) / s;
+                divide(rows, j, head, first, last);
+                head = 1;
+            }
             heads[2 * j] = head;
             heads[2 * j + 1] = beta;
             top[j] = alpha;
@@ -69,6 +79,22 @@ final class Householder {
             rest += row[p] * row[p];
         }
         return rest;
+    }
+
+    /** The length of a column whose squares would underflow: rows used up by earlier columns leave such rests. */
+    private static double length(double[][] rows, int j, double top, double largest) {
+        double scale = Math.max(largest, Math.abs(top));
+        double sum = top / scale * (top / scale);
+        for (double[] row : rows) {
+            sum += row[j] / scale * (row[j] / scale);
+        }
+        return scale * Math.sqrt(sum);
+    }
+
+    private static void divide(double[][] rows, int j, double head, int first, int last) {
+        for (int i = first; i <= last; i++) {
+            rows[i][j] /= head;
+        }
     }
 
     /** w += sum over the rows first to last of rows[i][j] * rows[i], from column j + 1 on. */

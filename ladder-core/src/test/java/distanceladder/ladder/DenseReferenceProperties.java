@@ -33,6 +33,12 @@ class DenseReferenceProperties {
         compare(whole.over(some));
     }
 
+    /** Rows used up by earlier columns left rests whose squares underflow, and not a number with them. */
+    @net.jqwik.api.Example
+    void restsThatUnderflow() {
+        compare(new RandomLadder(-1389214789L, 1).ladder().solve());
+    }
+
     static void compare(Solution solution) {
         Settled settled = solution.settled();
         DenseReference dense = new DenseReference(settled);
