@@ -29,8 +29,7 @@ import org.junit.jupiter.api.Test;
  *
  * <p>The ladder's own modulus of the cloud against the geometric one of Pietrzynski et al. 2019, 49.59 +- 0.09 +- 0.54 kpc,
  * as a pull of the difference. Nothing is tuned. The table's
- * geometric corrections of single stars, 0.010 mag in the mean, are left out: they change the modulus by no more than
- * that. The metallicity of the cloud's stars is that of none of the tables; [Fe/H]
+ * magnitudes m_H hold its geometric corrections of single stars already. The metallicity of the cloud's stars is that of none of the tables; [Fe/H]
  * -0.33 is common practice, from memory, and enters with the coefficient -0.17 +- 0.06 (error from memory too).
  */
 @Tag("validation")
