@@ -9,7 +9,7 @@
  * double d = Distances.megaparsecFromModulus(31.5);                 // 19.95 Mpc
  * double f = Cosmography.f(0.0233, -0.55, 1);                       // 1.01791
  * double mas = Unit.MICROARCSECOND.convert(17, Unit.MILLIARCSECOND); // 0.017
- * double z = Frame.BACKGROUND.redshift(0.0233, 194.95, 27.98);      // 0.02421
+ * double z = Frame.BACKGROUND.redshift(0.0233, 194.95, 27.98);      // 0.02422
  * }</pre>
  *
  * <p>Powers, logarithms and angles go through {@link java.lang.StrictMath}, so that bits are alike on every virtual
